@@ -1,0 +1,106 @@
+import type { Given } from '../units/provenance';
+
+/** The wall that holds the flaw. A plate of width `null` is taken as wide against the flaw. */
+export type WallInput =
+  | { readonly shape: 'plate'; readonly thicknessMm: Given; readonly widthMm: Given | null }
+  | { readonly shape: 'cylinder'; readonly thicknessMm: Given; readonly insideDiameterMm: Given };
+
+/** The flaw as measured, before any sizing allowance. */
+export interface FlawInput {
+  readonly kind: 'surface' | 'embedded';
+  /** Face a surface flaw opens to; for an embedded flaw the face its ligament is measured to. */
+  readonly face: 'inside' | 'outside';
+  /** Plane of the flaw in a cylinder; in a plate it is normal to the membrane stress and this is ignored. */
+  readonly orientation: 'axial' | 'circumferential';
+  /** Through-wall extent [mm]: depth a of a surface flaw, full height 2a of an embedded one. */
+  readonly heightMm: Given;
+  /** Length along the wall, 2c [mm]. */
+  readonly lengthMm: Given;
+  /** Ligament p from an embedded flaw to `face` [mm]; null for a surface flaw. */
+  readonly ligamentMm: Given | null;
+}
+
+/** What is added to the measured size before anything is computed. */
+export interface SizingInput {
+  /** Added to the through-wall extent [mm]; an embedded flaw's ligament shrinks by half of it. */
+  readonly heightAllowanceMm: Given;
+  /** Added to the length [mm]. */
+  readonly lengthAllowanceMm: Given;
+}
+
+/** Residual stress normal to the flaw. */
+export type ResidualStressInput =
+  | { readonly state: 'none' }
+  | { readonly state: 'entered'; readonly membraneMPa: Given; readonly bendingMPa: Given }
+  /** Yield magnitude, relaxed by the primary load: min(yield, (1.4 − σref/σflow) yield). */
+  | { readonly state: 'as-welded' }
+  /** 20 % of yield for a flaw parallel to the weld, 30 % for one transverse to it. */
+  | { readonly state: 'heat-treated'; readonly flawToWeld: 'parallel' | 'transverse' };
+
+/** Stress normal to the flaw plane at the governing load [MPa]. Bending is positive when the flawed face is in tension. */
+export interface StressInput {
+  readonly primaryMembraneMPa: Given;
+  readonly primaryBendingMPa: Given;
+  readonly residual: ResidualStressInput;
+  /** Pressure acting on the faces of a crack open to the bore [MPa]; 0 or null when it does not reach them. */
+  readonly crackFacePressureMPa: Given | null;
+}
+
+/** Material at the governing temperature. */
+export interface MaterialInput {
+  readonly yieldMPa: Given;
+  readonly tensileMPa: Given;
+  readonly youngsModulusMPa: Given;
+  readonly poissonsRatio: Given;
+  /** Fracture toughness Kmat [MPa·√m]. */
+  readonly toughnessMPaSqrtM: Given;
+  /** Whether the stress–strain curve has a yield plateau (no diagram beyond Lr = 1 is then claimed). */
+  readonly yieldPlateau: boolean;
+}
+
+/** One straight piece of a two-stage Paris law, N and mm: da/dN [mm/cycle] = coefficient · ΔK^exponent, ΔK in MPa·√mm. */
+export interface ParisStage {
+  readonly coefficient: number;
+  readonly exponent: number;
+}
+
+/** A fatigue growth law from the site's library, with its source. */
+export interface FatigueLawInput {
+  readonly key: string;
+  readonly title: string;
+  readonly source: string;
+  /** In order of ΔK: one stage (simplified law) or two that meet. */
+  readonly stages: readonly ParisStage[];
+  /** Below this ΔK nothing grows [MPa·√mm]; 0 for none. */
+  readonly thresholdMPaSqrtMm: number;
+}
+
+/** One block of the operating histogram: how often per year a stress range is applied. */
+export interface CycleBlockInput {
+  readonly membraneRangeMPa: number;
+  readonly bendingRangeMPa: number;
+  readonly cyclesPerYear: number;
+  readonly note: string;
+}
+
+/** What makes the flaw grow; both parts may be null (no growth expected). */
+export interface GrowthInput {
+  readonly fatigue: { readonly law: FatigueLawInput; readonly blocks: readonly CycleBlockInput[] } | null;
+  /** Constant (plateau) rates of stress corrosion: into the wall, and at each end along the surface [mm/year]. */
+  readonly stressCorrosion: {
+    readonly depthRateMmPerYear: Given;
+    readonly endRateMmPerYear: Given;
+  } | null;
+}
+
+/** Everything one assessment needs, in N and mm but for the fields that name another unit. */
+export interface AssessmentInput {
+  readonly wall: WallInput;
+  readonly flaw: FlawInput;
+  readonly sizing: SizingInput;
+  readonly stress: StressInput;
+  readonly material: MaterialInput;
+  readonly growth: GrowthInput;
+  /** Growth is followed no further than this [years]. */
+  readonly horizonYears: number;
+}
