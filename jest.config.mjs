@@ -1,4 +1,4 @@
-import { createEsmPreset } from 'jest-preset-angular/presets/index.js';
+import presets from 'jest-preset-angular/presets/index.js';
 
 const domainAlias = { '^@ligament/domain/(.*)$': '<rootDir>/libs/domain/src/$1' };
 
@@ -23,7 +23,7 @@ const node = (displayName, roots) => ({
   moduleNameMapper: domainAlias,
 });
 
-const angular = createEsmPreset({ tsconfig: '<rootDir>/apps/client/tsconfig.spec.json' });
+const angular = presets.createEsmPreset({ tsconfig: '<rootDir>/apps/client/tsconfig.spec.json' });
 
 /** @type {import('jest').Config} */
 export default {
