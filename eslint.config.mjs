@@ -23,10 +23,16 @@ export default defineConfig(
     extends: [tseslint.configs.strict, tseslint.configs.stylistic],
     rules: {
       '@typescript-eslint/consistent-type-imports': ['error', { fixStyle: 'inline-type-imports' }],
-      '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }],
+      '@typescript-eslint/no-unused-vars': [
+        'error',
+        { argsIgnorePattern: '^_', varsIgnorePattern: '^_' },
+      ],
       '@typescript-eslint/no-non-null-assertion': 'error',
       '@typescript-eslint/consistent-type-definitions': 'off',
-      '@typescript-eslint/no-extraneous-class': ['error', { allowWithDecorator: true, allowConstructorOnly: true }],
+      '@typescript-eslint/no-extraneous-class': [
+        'error',
+        { allowWithDecorator: true, allowConstructorOnly: true },
+      ],
       'no-control-regex': 'error',
       'no-console': 'error',
       eqeqeq: 'error',
@@ -52,9 +58,18 @@ export default defineConfig(
       'no-restricted-syntax': [
         'error',
         ...everywhere,
-        ban("NewExpression[callee.name='Date'][arguments.length=0]", 'The day comes in as an argument.'),
-        ban("CallExpression[callee.object.name='Date'][callee.property.name='now']", 'The day comes in as an argument.'),
-        ban("CallExpression[callee.object.name='Math'][callee.property.name='random']", 'Chance comes in as an argument.'),
+        ban(
+          "NewExpression[callee.name='Date'][arguments.length=0]",
+          'The day comes in as an argument.',
+        ),
+        ban(
+          "CallExpression[callee.object.name='Date'][callee.property.name='now']",
+          'The day comes in as an argument.',
+        ),
+        ban(
+          "CallExpression[callee.object.name='Math'][callee.property.name='random']",
+          'Chance comes in as an argument.',
+        ),
       ],
     },
   },
@@ -68,8 +83,14 @@ export default defineConfig(
     extends: [angular.configs.tsRecommended],
     processor: angular.processInlineTemplates,
     rules: {
-      '@angular-eslint/component-selector': ['error', { type: 'element', prefix: ['app', 'lg'], style: 'kebab-case' }],
-      '@angular-eslint/directive-selector': ['error', { type: 'attribute', prefix: ['app', 'lg'], style: 'camelCase' }],
+      '@angular-eslint/component-selector': [
+        'error',
+        { type: 'element', prefix: ['app', 'lg'], style: 'kebab-case' },
+      ],
+      '@angular-eslint/directive-selector': [
+        'error',
+        { type: 'attribute', prefix: ['app', 'lg'], style: 'camelCase' },
+      ],
       '@angular-eslint/prefer-on-push-component-change-detection': 'error',
     },
   },
@@ -78,7 +99,13 @@ export default defineConfig(
     extends: [angular.configs.templateRecommended, angular.configs.templateAccessibility],
   },
   {
-    files: ['apps/api/src/main.ts', 'apps/tools/**', 'tests/verification/print-table.ts', 'seeds/**', 'db/**'],
+    files: [
+      'apps/api/src/main.ts',
+      'apps/tools/**',
+      'tests/verification/print-table.ts',
+      'seeds/**',
+      'db/**',
+    ],
     rules: { 'no-console': 'off' },
   },
 );

@@ -12,7 +12,10 @@ export async function buildApi() {
   rmSync(`${root}dist/api`, { recursive: true, force: true });
   await build({
     absWorkingDir: root,
-    entryPoints: { main: 'apps/api/src/main.ts', 'pglite-worker': 'apps/api/src/db/pglite-worker.ts' },
+    entryPoints: {
+      main: 'apps/api/src/main.ts',
+      'pglite-worker': 'apps/api/src/db/pglite-worker.ts',
+    },
     outdir: 'dist/api',
     bundle: true,
     splitting: true,
@@ -32,7 +35,12 @@ export function buildClient() {
   const ng = spawnSync(
     process.execPath,
     ['node_modules/@angular/cli/bin/ng.js', 'build', '--stats-json'],
-    { cwd: root, stdio: ['ignore', 'pipe', 'inherit'], encoding: 'utf8', env: { ...process.env, NG_CLI_ANALYTICS: 'false' } },
+    {
+      cwd: root,
+      stdio: ['ignore', 'pipe', 'inherit'],
+      encoding: 'utf8',
+      env: { ...process.env, NG_CLI_ANALYTICS: 'false' },
+    },
   );
   if (ng.status !== 0) {
     process.stderr.write(ng.stdout);

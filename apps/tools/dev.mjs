@@ -4,11 +4,15 @@ import { fileURLToPath } from 'node:url';
 
 const root = fileURLToPath(new URL('../../', import.meta.url));
 const parts = [
-  spawn(process.execPath, ['node_modules/tsx/dist/cli.mjs', 'watch', '--clear-screen=false', 'apps/api/src/main.ts'], {
-    cwd: root,
-    stdio: 'inherit',
-    env: { ...process.env, PORT: '4310', LIGAMENT_PUBLIC_URL: 'http://localhost:4300' },
-  }),
+  spawn(
+    process.execPath,
+    ['node_modules/tsx/dist/cli.mjs', 'watch', '--clear-screen=false', 'apps/api/src/main.ts'],
+    {
+      cwd: root,
+      stdio: 'inherit',
+      env: { ...process.env, PORT: '4310', LIGAMENT_PUBLIC_URL: 'http://localhost:4300' },
+    },
+  ),
   spawn(process.execPath, ['node_modules/@angular/cli/bin/ng.js', 'serve', '--port', '4300'], {
     cwd: root,
     stdio: 'inherit',

@@ -16,11 +16,15 @@ export function ensureChromium() {
   if (process.getuid?.() === 0 && existsSync('/usr/bin/apt-get')) {
     console.log('Installing Chromium for the browser journeys …');
     spawnSync('apt-get', ['update'], { stdio: 'ignore' });
-    spawnSync('apt-get', ['install', '-y', '--no-install-recommends', 'chromium'], { stdio: 'ignore' });
+    spawnSync('apt-get', ['install', '-y', '--no-install-recommends', 'chromium'], {
+      stdio: 'ignore',
+    });
   }
   const installed = findChromium();
   if (!installed) {
-    throw new Error('The browser journeys need Chromium: apt-get install chromium, or name one in LIGAMENT_CHROMIUM.');
+    throw new Error(
+      'The browser journeys need Chromium: apt-get install chromium, or name one in LIGAMENT_CHROMIUM.',
+    );
   }
   return installed;
 }

@@ -3,7 +3,15 @@ import { createHash } from 'node:crypto';
 import { existsSync, mkdirSync, readdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { join } from 'node:path';
 
-const SOURCES = ['apps', 'libs', 'db', 'seeds', 'angular.json', 'package-lock.json', 'tsconfig.json'];
+const SOURCES = [
+  'apps',
+  'libs',
+  'db',
+  'seeds',
+  'angular.json',
+  'package-lock.json',
+  'tsconfig.json',
+];
 const STAMP = 'dist/source-stamp';
 
 function hashInto(hash, path) {

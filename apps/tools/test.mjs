@@ -28,7 +28,17 @@ function suites(name, projects) {
   rmSync(report, { force: true });
   spawnSync(
     process.execPath,
-    ['--experimental-vm-modules', '--no-warnings', 'node_modules/jest/bin/jest.js', '--selectProjects', ...projects, '--json', `--outputFile=${report}`, '--maxWorkers=2', '--workerIdleMemoryLimit=1500MB'],
+    [
+      '--experimental-vm-modules',
+      '--no-warnings',
+      'node_modules/jest/bin/jest.js',
+      '--selectProjects',
+      ...projects,
+      '--json',
+      `--outputFile=${report}`,
+      '--maxWorkers=2',
+      '--workerIdleMemoryLimit=1500MB',
+    ],
     { stdio: ['ignore', 'ignore', 'inherit'] },
   );
   try {
@@ -49,7 +59,13 @@ node('lint', 'eslint/bin/eslint.js', '.', '--max-warnings', '0');
 for (const project of ['libs/domain', 'apps/api', 'tests']) {
   node(`types of ${project}`, 'typescript/bin/tsc', '--noEmit', '-p', `${project}/tsconfig.json`);
 }
-node('types of apps/client', '@angular/compiler-cli/bundles/src/bin/ngc.js', '--noEmit', '-p', 'apps/client/tsconfig.app.json');
+node(
+  'types of apps/client',
+  '@angular/compiler-cli/bundles/src/bin/ngc.js',
+  '--noEmit',
+  '-p',
+  'apps/client/tsconfig.app.json',
+);
 suites('unit and verification tests', ['domain', 'verification', 'client']);
 suites('API tests', ['api']);
 if (isBuilt(root)) count('build (as it stands)', true);

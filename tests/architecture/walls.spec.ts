@@ -39,7 +39,16 @@ const REST: Readonly<Record<string, readonly string[]>> = {
   'api/mail': ['domain/contract', 'domain/schema', 'api/db', 'api/root', 'api/http'],
   'api/modules': [...EVERY_DOMAIN_ROOM, 'api/http', 'api/db', 'api/mail', 'api/root'],
   'api/jobs': ['api/modules', 'api/mail', 'api/db', 'api/http', 'api/root', ...EVERY_DOMAIN_ROOM],
-  'api/root': ['api/http', 'api/db', 'api/mail', 'api/modules', 'api/jobs', 'seeds', 'domain/schema', 'domain/contract'],
+  'api/root': [
+    'api/http',
+    'api/db',
+    'api/mail',
+    'api/modules',
+    'api/jobs',
+    'seeds',
+    'domain/schema',
+    'domain/contract',
+  ],
   'client/shared': [...BROWSER_ROOMS],
   'client/core': ['client/shared', 'domain/contract', 'domain/units'],
   'client/features': ['client/core', 'client/shared', ...BROWSER_ROOMS],
@@ -72,7 +81,10 @@ describe('the walls between rooms', () => {
   it('lets no module reach into another module’s repository', () => {
     const module = (path: string) => /api\/src\/modules\/([^/]+)\//.exec(path)?.[1];
     const strays = imports()
-      .filter(({ file, target }) => /\.repository(\.ts)?$/.test(target) && module(file) !== module(target))
+      .filter(
+        ({ file, target }) =>
+          /\.repository(\.ts)?$/.test(target) && module(file) !== module(target),
+      )
       .map(({ file, target }) => `${file} → ${target}`);
     expect(strays).toEqual([]);
   });
@@ -89,7 +101,11 @@ describe('the walls between rooms', () => {
     const banned = /^(drizzle-orm|@electric-sql|express|lucia|pg|multer|nodemailer|node:)/;
     const strays = files
       .filter((file) => /apps\/client\/src|libs\/domain\/src\/(?!schema)/.test(file))
-      .flatMap((file) => packagesOf(file).filter((name) => banned.test(name)).map((name) => `${file} → ${name}`));
+      .flatMap((file) =>
+        packagesOf(file)
+          .filter((name) => banned.test(name))
+          .map((name) => `${file} → ${name}`),
+      );
     expect(strays).toEqual([]);
   });
 });
@@ -120,17 +136,26 @@ function imports(): Import[] {
 }
 
 function specifiersOf(file: string): { name: string; typeOnly: boolean }[] {
-  const source = ts.createSourceFile(file, readFileSync(join(ROOT, file), 'utf8'), ts.ScriptTarget.ES2022);
+  const source = ts.createSourceFile(
+    file,
+    readFileSync(join(ROOT, file), 'utf8'),
+    ts.ScriptTarget.ES2022,
+  );
   const found: { name: string; typeOnly: boolean }[] = [];
   const visit = (node: ts.Node): void => {
     if (ts.isImportDeclaration(node) && ts.isStringLiteral(node.moduleSpecifier)) {
       found.push({ name: node.moduleSpecifier.text, typeOnly: isTypeOnly(node.importClause) });
-    } else if (ts.isExportDeclaration(node) && node.moduleSpecifier && ts.isStringLiteral(node.moduleSpecifier)) {
+    } else if (
+      ts.isExportDeclaration(node) &&
+      node.moduleSpecifier &&
+      ts.isStringLiteral(node.moduleSpecifier)
+    ) {
       found.push({ name: node.moduleSpecifier.text, typeOnly: node.isTypeOnly });
     } else if (ts.isCallExpression(node) && node.expression.kind === ts.SyntaxKind.ImportKeyword) {
       const [argument] = node.arguments;
       // a lazy import breaks a circle
-      if (argument && ts.isStringLiteral(argument)) found.push({ name: argument.text, typeOnly: true });
+      if (argument && ts.isStringLiteral(argument))
+        found.push({ name: argument.text, typeOnly: true });
     }
     ts.forEachChild(node, visit);
   };
@@ -142,7 +167,12 @@ function isTypeOnly(clause: ts.ImportClause | undefined): boolean {
   if (!clause) return false;
   if (clause.isTypeOnly) return true;
   const names = clause.namedBindings;
-  return !clause.name && !!names && ts.isNamedImports(names) && names.elements.every((each) => each.isTypeOnly);
+  return (
+    !clause.name &&
+    !!names &&
+    ts.isNamedImports(names) &&
+    names.elements.every((each) => each.isTypeOnly)
+  );
 }
 
 const packagesOf = (file: string) =>
@@ -160,7 +190,8 @@ function resolveLocal(file: string, name: string): string | undefined {
 }
 
 function roomOf(path: string): string {
-  if (/libs\/domain\/src\/assessment\/assessment-(input|outcome)/.test(path)) return 'domain/assessment-types';
+  if (/libs\/domain\/src\/assessment\/assessment-(input|outcome)/.test(path))
+    return 'domain/assessment-types';
   const domain = /libs\/domain\/src\/([^/]+)\//.exec(path)?.[1];
   if (domain) return `domain/${domain}`;
   const api = /apps\/api\/src\/(http|db|mail|modules|jobs)\//.exec(path)?.[1];

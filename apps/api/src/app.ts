@@ -13,7 +13,10 @@ import { authenticateWith } from './modules/auth/authenticate';
 import { serveModules } from './modules/serve-modules';
 
 /** Builds the product's HTTP side from its dependencies; it neither listens nor reads the environment. */
-export function createApp(deps: Deps, clientFolder: string): { readonly app: Express; readonly api: Api } {
+export function createApp(
+  deps: Deps,
+  clientFolder: string,
+): { readonly app: Express; readonly api: Api } {
   const app = express();
   app.disable('x-powered-by');
   app.set('trust proxy', deps.config.trustProxy ? 1 : false);
@@ -44,10 +47,19 @@ function unknownRoute(api: Api): express.RequestHandler {
       .filter((contract) => pathPattern(contract.path).test(path))
       .map((contract) => contract.method.toUpperCase());
     if (methods.length === 0) {
-      return next(new Failure('route.unknown', 404, 'Not found', 'There is nothing at this address.'));
+      return next(
+        new Failure('route.unknown', 404, 'Not found', 'There is nothing at this address.'),
+      );
     }
     response.setHeader('Allow', methods.join(', '));
-    return next(new Failure('method.unsupported', 405, 'Method not supported', `This address answers ${methods.join(', ')}.`));
+    return next(
+      new Failure(
+        'method.unsupported',
+        405,
+        'Method not supported',
+        `This address answers ${methods.join(', ')}.`,
+      ),
+    );
   };
 }
 

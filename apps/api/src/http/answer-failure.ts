@@ -13,7 +13,8 @@ export function answerFailure(log: Logger): ErrorRequestHandler {
       return;
     }
     const failure = asFailure(error);
-    if (failure.status >= 500) log.error({ err: error, requestId: requestId(response) }, failure.code);
+    if (failure.status >= 500)
+      log.error({ err: error, requestId: requestId(response) }, failure.code);
     if (failure.more.retryAfterSeconds !== undefined) {
       response.setHeader('Retry-After', String(failure.more.retryAfterSeconds));
     }
@@ -39,35 +40,76 @@ function asFailure(error: unknown): Failure {
   if (error instanceof MulterError) return uploadFailure(error);
   const cause = causeChain(error);
   if (cause.some((each) => each instanceof StorageFull)) {
-    return new Failure('storage.full', 507, 'Storage is full', 'The server’s disk is nearly full; nothing was saved. Tell your administrator.');
+    return new Failure(
+      'storage.full',
+      507,
+      'Storage is full',
+      'The server’s disk is nearly full; nothing was saved. Tell your administrator.',
+    );
   }
   if (cause.some((each) => each instanceof DatabaseUnavailable)) {
-    return new Failure('database.unavailable', 503, 'Busy', 'The database did not answer in time; nothing was saved. Try again in a few seconds.', { retryAfterSeconds: 3 });
+    return new Failure(
+      'database.unavailable',
+      503,
+      'Busy',
+      'The database did not answer in time; nothing was saved. Try again in a few seconds.',
+      { retryAfterSeconds: 3 },
+    );
   }
-  return bodyFailure(error) ?? new Failure('internal', 500, 'Something went wrong', 'The request could not be completed and nothing was saved. Try again; if it happens again, give your administrator the request number.');
+  return (
+    bodyFailure(error) ??
+    new Failure(
+      'internal',
+      500,
+      'Something went wrong',
+      'The request could not be completed and nothing was saved. Try again; if it happens again, give your administrator the request number.',
+    )
+  );
 }
 
 function causeChain(error: unknown): unknown[] {
   const chain: unknown[] = [];
-  for (let each = error; each instanceof Error && chain.length < 5; each = each.cause) chain.push(each);
+  for (let each = error; each instanceof Error && chain.length < 5; each = each.cause)
+    chain.push(each);
   return chain;
 }
 
 function uploadFailure(error: MulterError): Failure {
   if (error.code === 'LIMIT_FILE_SIZE') {
-    return new Failure('upload.too-large', 413, 'File too large', 'The file is larger than this server accepts. Split it, or ask your administrator to raise the limit.');
+    return new Failure(
+      'upload.too-large',
+      413,
+      'File too large',
+      'The file is larger than this server accepts. Split it, or ask your administrator to raise the limit.',
+    );
   }
-  return new Failure('upload.refused', 400, 'Upload refused', `Send one file in the field "file" (${error.message}).`);
+  return new Failure(
+    'upload.refused',
+    400,
+    'Upload refused',
+    `Send one file in the field "file" (${error.message}).`,
+  );
 }
 
 /** Failures of Express' own body parser: too large, not JSON, aborted. */
 function bodyFailure(error: unknown): Failure | undefined {
-  if (!(error instanceof Error) || !('status' in error) || typeof error.status !== 'number') return undefined;
+  if (!(error instanceof Error) || !('status' in error) || typeof error.status !== 'number')
+    return undefined;
   if (error.status === 413) {
-    return new Failure('body.too-large', 413, 'Request too large', 'The request is larger than 256 kB.');
+    return new Failure(
+      'body.too-large',
+      413,
+      'Request too large',
+      'The request is larger than 256 kB.',
+    );
   }
   if (error.status >= 400 && error.status < 500) {
-    return new Failure('body.unreadable', 400, 'Request not readable', 'The request could not be read as JSON.');
+    return new Failure(
+      'body.unreadable',
+      400,
+      'Request not readable',
+      'The request could not be read as JSON.',
+    );
   }
   return undefined;
 }

@@ -9,7 +9,10 @@ export function clientFiles(folder: string): Router {
   const indexFile = join(folder, 'index.html');
   if (!existsSync(indexFile)) {
     router.get('/{*path}', (_request, response) => {
-      response.status(503).type('text/plain').send('The client is not built. Run npm start, which builds it.');
+      response
+        .status(503)
+        .type('text/plain')
+        .send('The client is not built. Run npm start, which builds it.');
     });
     return router;
   }

@@ -31,14 +31,25 @@ export async function idempotent(
   const key = request.method === 'POST' && actor ? request.get('idempotency-key') : undefined;
   if (key === undefined || !actor) return send(response, await work());
   if (!/^[\w-]{8,100}$/.test(key)) {
-    throw new Failure('idempotency-key', 400, 'Key not usable', 'An Idempotency-Key is 8 to 100 letters, digits, _ or -.');
+    throw new Failure(
+      'idempotency-key',
+      400,
+      'Key not usable',
+      'An Idempotency-Key is 8 to 100 letters, digits, _ or -.',
+    );
   }
   const hash = requestHash(request);
   const kept = await store.find(actor.personId, key);
   if (kept && kept.requestHash !== hash) {
-    throw new Failure('idempotency-key.reused', 422, 'Key already used', 'This Idempotency-Key was used for a different request.');
+    throw new Failure(
+      'idempotency-key.reused',
+      422,
+      'Key already used',
+      'This Idempotency-Key was used for a different request.',
+    );
   }
-  if (kept) return send(response, { status: kept.status, body: JSON.parse(kept.answer) as unknown });
+  if (kept)
+    return send(response, { status: kept.status, body: JSON.parse(kept.answer) as unknown });
   const outcome = await work();
   await store.keep(actor.personId, key, request.path, {
     requestHash: hash,

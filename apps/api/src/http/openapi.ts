@@ -18,7 +18,11 @@ export function openApiDocument(contracts: readonly RouteContract[], publicUrl: 
   }
   return {
     openapi: '3.1.0',
-    info: { title: 'Ligament', version: '1', description: 'Flaws of pressure equipment, from the inspection file to the signed decision.' },
+    info: {
+      title: 'Ligament',
+      version: '1',
+      description: 'Flaws of pressure equipment, from the inspection file to the signed decision.',
+    },
     servers: [{ url: publicUrl }],
     paths,
     components: {
@@ -52,7 +56,9 @@ function operation(contract: RouteContract) {
       [contract.status]: success,
       default: {
         description: 'Problem details (RFC 9457)',
-        content: { 'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } } },
+        content: {
+          'application/problem+json': { schema: { $ref: '#/components/schemas/Problem' } },
+        },
       },
     },
   };
@@ -73,8 +79,14 @@ function parameters(schema: z.ZodType, place: 'path' | 'query') {
 
 function requestBody(contract: RouteContract) {
   if (contract.upload) {
-    const file = { type: 'object', properties: { file: { type: 'string', format: 'binary' } }, required: ['file'] };
-    return { requestBody: { required: true, content: { 'multipart/form-data': { schema: file } } } };
+    const file = {
+      type: 'object',
+      properties: { file: { type: 'string', format: 'binary' } },
+      required: ['file'],
+    };
+    return {
+      requestBody: { required: true, content: { 'multipart/form-data': { schema: file } } },
+    };
   }
   if (contract.method === 'get' || contract.method === 'delete') return {};
   return {

@@ -16,7 +16,8 @@ export function sameOriginOnly(publicUrl: string): RequestHandler {
     if (site !== undefined && site !== 'same-origin') throw refusal();
     if (origin !== undefined && !isOurs(origin, ours, request.get('host'))) throw refusal();
     if (site === undefined && origin === undefined) throw refusal();
-    const json = request.is('application/json') !== false && request.is('application/json') !== null;
+    const json =
+      request.is('application/json') !== false && request.is('application/json') !== null;
     if (!json && request.get('x-requested-with') !== 'ligament') throw refusal();
     return next();
   };

@@ -48,7 +48,10 @@ export class Api {
     this.router[contract.method](contract.path, async (request, response) => {
       const actor = await this.admit(contract, request, response);
       for (const step of before) await run(step, request, response);
-      const call = { ...readInput(contract, request), actor, request, response } as Call<C, ActorOf<C>>;
+      const call = { ...readInput(contract, request), actor, request, response } as Call<
+        C,
+        ActorOf<C>
+      >;
       await idempotent(this.idempotency, actor, request, response, async () => {
         const answer = await handle(call);
         return { status: contract.status, body: answerBody(contract, answer) };
@@ -57,7 +60,10 @@ export class Api {
   }
 
   /** Serves bytes (a download); the handler writes the answer itself. */
-  stream<C extends RouteContract>(contract: C, handle: (call: Call<C, Actor>) => Promise<void>): void {
+  stream<C extends RouteContract>(
+    contract: C,
+    handle: (call: Call<C, Actor>) => Promise<void>,
+  ): void {
     this.contracts.push(contract);
     this.router[contract.method](contract.path, async (request, response) => {
       const actor = await this.admit(contract, request, response);
@@ -65,15 +71,27 @@ export class Api {
     });
   }
 
-  private async admit(contract: RouteContract, request: Request, response: Response): Promise<Actor | null> {
+  private async admit(
+    contract: RouteContract,
+    request: Request,
+    response: Response,
+  ): Promise<Actor | null> {
     const actor = await this.authenticate(request, response);
     if (contract.access === 'public') return actor;
     if (!actor) throw new Failure('unauthenticated', 401, 'Not signed in', 'Sign in to go on.');
     if (!may(actor.role, contract.access)) {
       throw forbidden(`Your role (${actor.role}) may not do this.`);
     }
-    if (contract.proof && this.clock.now().getTime() - actor.provedAt.getTime() > PROOF_MILLISECONDS) {
-      throw new Failure('proof-required', 403, 'Give your password again', 'A sign-off needs your password given again within the last five minutes.');
+    if (
+      contract.proof &&
+      this.clock.now().getTime() - actor.provedAt.getTime() > PROOF_MILLISECONDS
+    ) {
+      throw new Failure(
+        'proof-required',
+        403,
+        'Give your password again',
+        'A sign-off needs your password given again within the last five minutes.',
+      );
     }
     return { ...actor, requestId: requestId(response) };
   }
@@ -98,7 +116,12 @@ function readInput(contract: RouteContract, request: Request) {
 function refuseRepeatedKeys(request: Request): void {
   for (const [name, value] of Object.entries(request.query)) {
     if (typeof value !== 'string') {
-      throw new Failure('query.repeated', 400, 'Address not understood', `"${name}" stands in the address more than once.`);
+      throw new Failure(
+        'query.repeated',
+        400,
+        'Address not understood',
+        `"${name}" stands in the address more than once.`,
+      );
     }
   }
 }
@@ -107,18 +130,30 @@ function check(schema: z.ZodType, value: unknown, what: string): unknown {
   const read = schema.safeParse(value);
   if (read.success) return read.data;
   const errors = read.error.issues.map((issue) => ({
-    field: issue.path.join('.') || (issue.code === 'unrecognized_keys' ? issue.keys.join(', ') : ''),
+    field:
+      issue.path.join('.') || (issue.code === 'unrecognized_keys' ? issue.keys.join(', ') : ''),
     message: issue.message,
   }));
   const first = errors[0];
-  throw new Failure('input', 400, `${what} cannot be used`, first ? `${first.field ? `${first.field}: ` : ''}${first.message}` : 'Check the input.', { errors });
+  throw new Failure(
+    'input',
+    400,
+    `${what} cannot be used`,
+    first ? `${first.field ? `${first.field}: ` : ''}${first.message}` : 'Check the input.',
+    { errors },
+  );
 }
 
 function seenVersion(request: Request): number {
   const header = request.get('if-match');
   const version = /^"(\d{1,9})"$/.exec(header ?? '')?.[1];
   if (version === undefined) {
-    throw new Failure('if-match', 428, 'Version missing', 'Send If-Match with the version of the record you have seen, for example If-Match: "3".');
+    throw new Failure(
+      'if-match',
+      428,
+      'Version missing',
+      'Send If-Match with the version of the record you have seen, for example If-Match: "3".',
+    );
   }
   return Number(version);
 }

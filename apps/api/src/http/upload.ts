@@ -6,7 +6,14 @@ import { unacceptable } from './failure';
 export function receiveFile(maxBytes: number): RequestHandler {
   const receive = multer({
     storage: multer.memoryStorage(),
-    limits: { files: 1, fileSize: maxBytes, fields: 5, fieldSize: 10_000, parts: 8, headerPairs: 50 },
+    limits: {
+      files: 1,
+      fileSize: maxBytes,
+      fields: 5,
+      fieldSize: 10_000,
+      parts: 8,
+      headerPairs: 50,
+    },
     defParamCharset: 'utf8',
   });
   return receive.single('file');

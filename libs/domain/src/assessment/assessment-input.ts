@@ -85,7 +85,10 @@ export interface CycleBlockInput {
 
 /** What makes the flaw grow; both parts may be null (no growth expected). */
 export interface GrowthInput {
-  readonly fatigue: { readonly law: FatigueLawInput; readonly blocks: readonly CycleBlockInput[] } | null;
+  readonly fatigue: {
+    readonly law: FatigueLawInput;
+    readonly blocks: readonly CycleBlockInput[];
+  } | null;
   /** Constant (plateau) rates of stress corrosion: into the wall, and at each end along the surface [mm/year]. */
   readonly stressCorrosion: {
     readonly depthRateMmPerYear: Given;

@@ -5,7 +5,9 @@ import { PROVENANCES } from '../units/provenance';
 export const id = z.uuid({ error: 'This is not a valid record identifier.' });
 
 /** Calendar date without time, ISO 8601. */
-export const isoDate = z.iso.date({ error: 'Give a date as year-month-day, for example 2026-11-10.' });
+export const isoDate = z.iso.date({
+  error: 'Give a date as year-month-day, for example 2026-11-10.',
+});
 
 /** Instant in UTC, ISO 8601. */
 export const instant = z.iso.datetime({ offset: true });

@@ -60,7 +60,8 @@ export function route<
   };
 }
 
-export type ParamsOf<C> = C extends RouteContract<infer P, Shape, Shape, Shape> ? z.input<P> : never;
+export type ParamsOf<C> =
+  C extends RouteContract<infer P, Shape, Shape, Shape> ? z.input<P> : never;
 export type QueryOf<C> = C extends RouteContract<Shape, infer Q, Shape, Shape> ? z.input<Q> : never;
 export type BodyOf<C> = C extends RouteContract<Shape, Shape, infer B, Shape> ? z.input<B> : never;
 export type ResponseOf<C> =

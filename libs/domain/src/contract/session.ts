@@ -128,7 +128,8 @@ export const setUp = route({
 export const requestPasswordReset = route({
   method: 'post',
   path: '/api/password-resets',
-  summary: 'Ask for a password reset by e-mail; the answer never tells whether the address is known',
+  summary:
+    'Ask for a password reset by e-mail; the answer never tells whether the address is known',
   access: 'public',
   status: 202,
   body: z.strictObject({ email }),

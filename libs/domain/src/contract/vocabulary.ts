@@ -1,6 +1,12 @@
 // Every list of words that schema, routes, screens and messages share stands here once.
 
-export const COMPONENT_KINDS = ['vessel shell', 'head', 'sphere', 'pipe', 'exchanger shell'] as const;
+export const COMPONENT_KINDS = [
+  'vessel shell',
+  'head',
+  'sphere',
+  'pipe',
+  'exchanger shell',
+] as const;
 export type ComponentKind = (typeof COMPONENT_KINDS)[number];
 
 export const COMPONENT_STATES = ['in service', 'out of service', 'retired'] as const;
@@ -111,7 +117,12 @@ export const ASSESSMENT_STATES = [
 ] as const;
 export type AssessmentState = (typeof ASSESSMENT_STATES)[number];
 
-export const SIGNATURE_MEANINGS = ['authored', 'returned', 'reviewed and approved', 'acknowledged'] as const;
+export const SIGNATURE_MEANINGS = [
+  'authored',
+  'returned',
+  'reviewed and approved',
+  'acknowledged',
+] as const;
 export type SignatureMeaning = (typeof SIGNATURE_MEANINGS)[number];
 
 export const REINSPECTION_STATES = [

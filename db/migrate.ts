@@ -1,0 +1,14 @@
+// npm run migrate: brings the database of the settings up to date without starting the product.
+import { resolve } from 'node:path';
+import { pino } from 'pino';
+import { readConfig } from '../apps/api/src/config';
+import { openDatabase } from '../apps/api/src/db/open-database';
+
+const config = readConfig(process.env);
+const database = await openDatabase({
+  dataDir: resolve(config.dataDir),
+  databaseUrl: config.databaseUrl,
+  log: pino({ level: config.logLevel }),
+});
+await database.close();
+console.log('The database is up to date.');
