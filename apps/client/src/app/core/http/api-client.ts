@@ -25,12 +25,19 @@ export interface CallOptions<C extends RouteContract> {
 export class ApiClient {
   private readonly http = inject(HttpClient);
 
-  call<C extends RouteContract>(contract: C, options: CallOptions<C> = {}): Observable<ResponseOf<C>> {
-    return this.http.request<ResponseOf<C>>(contract.method, this.address(contract, options.params), {
-      body: options.body,
-      params: queryOf(options.query),
-      headers: headersOf(options),
-    });
+  call<C extends RouteContract>(
+    contract: C,
+    options: CallOptions<C> = {},
+  ): Observable<ResponseOf<C>> {
+    return this.http.request<ResponseOf<C>>(
+      contract.method,
+      this.address(contract, options.params),
+      {
+        body: options.body,
+        params: queryOf(options.query),
+        headers: headersOf(options),
+      },
+    );
   }
 
   /** Address of a route with its parameters filled in, for links that download. */

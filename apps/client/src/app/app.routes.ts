@@ -1,0 +1,30 @@
+import type { Routes } from '@angular/router';
+import { signedInGuard } from './core/session/signed-in-guard';
+
+/** Pages behind the sign-in, one lazy feature a line. */
+const pages: Routes = [
+  { path: '', pathMatch: 'full', redirectTo: 'today' },
+  { path: 'account', loadChildren: () => import('./features/account/account.routes') },
+  {
+    path: 'not-allowed',
+    title: 'Not allowed',
+    loadComponent: () => import('./features/sign-in/not-allowed').then((m) => m.NotAllowed),
+  },
+];
+
+export const routes: Routes = [
+  { path: '', loadChildren: () => import('./features/sign-in/sign-in.routes') },
+  {
+    path: '',
+    canActivate: [signedInGuard],
+    loadComponent: () => import('./core/shell/shell').then((m) => m.Shell),
+    children: [
+      ...pages,
+      {
+        path: '**',
+        title: 'Not found',
+        loadComponent: () => import('./features/sign-in/not-found').then((m) => m.NotFound),
+      },
+    ],
+  },
+];

@@ -1,0 +1,66 @@
+import { ChangeDetectionStrategy, Component, input } from '@angular/core';
+
+/** A key figure: never bare, always with its unit and, where there is one, its uncertainty. */
+export interface Figure {
+  readonly label: string;
+  readonly value: string;
+  readonly unit?: string;
+  /** Uncertainty or side remark, e.g. `± 0.7`. */
+  readonly beside?: string;
+  readonly tone?: 'good' | 'warn' | 'bad';
+}
+
+/** Key figures in one row. */
+@Component({
+  selector: 'app-figure-strip',
+  template: `
+    <dl>
+      @for (figure of figures(); track figure.label) {
+        <div>
+          <dt>{{ figure.label }}</dt>
+          <dd [class]="figure.tone ?? ''">
+            <strong>{{ figure.value }}</strong> <span>{{ figure.beside }} {{ figure.unit }}</span>
+          </dd>
+        </div>
+      }
+    </dl>
+  `,
+  styles: `
+    :host {
+      display: block;
+      margin-bottom: 16px;
+    }
+    dl {
+      display: grid;
+      grid-template-columns: repeat(auto-fit, minmax(150px, 1fr));
+      margin: 0;
+      background: var(--rule);
+      border: 1px solid var(--rule);
+      border-radius: var(--radius);
+      gap: 1px;
+    }
+    div {
+      padding: 10px 16px;
+      background: var(--sheet);
+    }
+    dt {
+      color: var(--ink-2);
+      font-size: 12px;
+    }
+    dd {
+      margin: 2px 0 0;
+    }
+    strong {
+      font-size: 19px;
+      font-weight: 600;
+    }
+    dd span {
+      color: var(--ink-2);
+      font-size: 12px;
+    }
+  `,
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class FigureStrip {
+  readonly figures = input.required<readonly Figure[]>();
+}
