@@ -1,0 +1,133 @@
+import { integrateGrowth, type GrowthLimit, type GrowthRun } from '../growth/integrate-growth';
+import { PROXIMITY_RULE, proximityMargin, surfaceDepth } from '../growth/recategorise';
+import { ratesPerYear, type Drivers, type Rates } from '../growth/growth-rates';
+import type { GrowthEnd, GrowthEvent, GrowthState } from './assessment-outcome';
+import type { CharacterisedFlaw } from './characterise';
+import type { FlawCase } from './flaw-case';
+import { growthStates, type Stretch } from './growth-states';
+import { sectionOf, type Section } from './section';
+
+/** The whole way of the flaw: what it passed, where it ended and why. */
+export interface GrowthHistory {
+  readonly path: readonly GrowthState[];
+  readonly events: readonly GrowthEvent[];
+  readonly years: number;
+  readonly end: GrowthEnd;
+  /** Limit of a solution that ended it, in words. */
+  readonly validityLimit: string | null;
+}
+
+/** States wanted on the path for drawing. */
+const DRAWN_STATES = 40;
+
+/** Follows the flaw from its assessed size, through changes of category, to the end. */
+export function followGrowth(
+  flaw: FlawCase,
+  start: CharacterisedFlaw,
+  drivers: Drivers,
+  horizonYears: number,
+): GrowthHistory {
+  const stretches: Stretch[] = [];
+  const events: GrowthEvent[] = [];
+  let current = start;
+  let elapsed = 0;
+  for (;;) {
+    const section = sectionOf(flaw, current);
+    const run = runSection(section, current, drivers, horizonYears - elapsed);
+    stretches.push({ section, run, from: elapsed });
+    const last = run.states[run.states.length - 1] ?? { years: 0, a: current.a, c: current.c };
+    elapsed += last.years;
+    if (run.limit !== 'proximity') {
+      return {
+        path: growthStates(stretches, drivers),
+        events,
+        years: elapsed,
+        ...endOf(run, section, last),
+      };
+    }
+    const nearest = section.ligament(last.a);
+    const depth = surfaceDepth(last.a, nearest);
+    events.push({
+      years: elapsed,
+      from: 'embedded',
+      to: 'surface',
+      heightBeforeMm: 2 * last.a,
+      heightAfterMm: depth,
+      rule: PROXIMITY_RULE,
+    });
+    current = {
+      kind: 'surface',
+      face: section.nearestFace(last.a),
+      a: depth,
+      c: last.c,
+      ligament: 0,
+      height: depth,
+      recategorised: true,
+    };
+  }
+}
+
+function runSection(
+  section: Section,
+  start: CharacterisedFlaw,
+  drivers: Drivers,
+  horizonYears: number,
+): GrowthRun {
+  const rates = rateFunction(section, drivers);
+  const limits = limitsOf(section);
+  const size = { a: start.a, c: start.c };
+  // a jump in category may land on a limit at once
+  const spent = limits.find(({ margin }) => !(margin(size.a, size.c) > 0));
+  if (spent) {
+    const states = [{ years: 0, ...size }];
+    return { stop: 'limit', limit: spent.key, states, distance: 0, evaluations: 0 };
+  }
+  const first = integrateGrowth(size, rates, limits, { horizonYears });
+  if (first.states.length > DRAWN_STATES || first.distance === 0) return first;
+  return integrateGrowth(size, rates, limits, {
+    horizonYears,
+    maxStep: Math.min(first.distance / DRAWN_STATES, 0.1),
+  });
+}
+
+function limitsOf(section: Section): GrowthLimit[] {
+  const limits: GrowthLimit[] = [
+    { key: 'diagram', margin: section.margin },
+    { key: 'validity', margin: (a, c) => section.validity(a, c).room },
+  ];
+  if (section.kind === 'embedded') {
+    limits.unshift({ key: 'proximity', margin: (a) => proximityMargin(a, section.ligament(a)) });
+  }
+  return limits;
+}
+
+function rateFunction(section: Section, drivers: Drivers) {
+  const { evaluator, crackAt } = section;
+  const perYear = ratesPerYear(drivers, { deepest: evaluator.deepest, end: evaluator.end });
+  return (a: number, c: number, into: Rates) => {
+    evaluator.takeEnds(crackAt(a, c));
+    perYear(into);
+  };
+}
+
+function endOf(
+  run: GrowthRun,
+  section: Section,
+  last: { readonly a: number; readonly c: number },
+): { readonly end: GrowthEnd; readonly validityLimit: string | null } {
+  switch (run.stop) {
+    case 'horizon':
+      return { end: 'horizon', validityLimit: null };
+    case 'no growth':
+      return { end: 'no growth', validityLimit: null };
+    case 'step limit':
+      return { end: 'outside validity', validityLimit: 'steps of the integration' };
+    case 'limit':
+      return run.limit === 'diagram'
+        ? { end: 'limit reached', validityLimit: null }
+        : {
+            end: 'outside validity',
+            validityLimit: section.validity(last.a, last.c).limit?.text ?? null,
+          };
+  }
+}

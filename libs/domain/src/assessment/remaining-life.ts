@@ -1,0 +1,45 @@
+import type { GrowthHistory } from './follow-growth';
+import type { RemainingLife } from './assessment-outcome';
+
+// rounded down so that no figure promises more than was computed
+const down = (years: number) => Math.floor(years * 100) / 100;
+
+/** Longest life ever stated as a figure [years]; common practice. */
+const LONGEST_STATED = 40;
+
+/** The life of a flaw that is not acceptable now: there is none. */
+export const NO_LIFE: RemainingLife = {
+  years: null,
+  cycles: null,
+  end: 'already at limit',
+  because: 'The flaw is not acceptable at its assessed size: there is no remaining life.',
+  firstEventYears: null,
+};
+
+/** States the remaining life of an acceptable flaw, rounded down, with the reason it ends. */
+export function remainingLife(history: GrowthHistory, cyclesPerYear: number): RemainingLife {
+  const years = down(history.years);
+  const event = history.events[0];
+  return {
+    years,
+    cycles: Math.floor(history.years * cyclesPerYear),
+    end: history.end,
+    because: because(history, years),
+    firstEventYears: event ? down(event.years) : null,
+  };
+}
+
+function because({ end, validityLimit, years: exact }: GrowthHistory, years: number): string {
+  switch (end) {
+    case 'limit reached':
+      return `The growing flaw reaches the line of the failure assessment diagram after ${years} years.`;
+    case 'outside validity':
+      return `After ${years} years the growing flaw leaves the range of the solution (${validityLimit ?? 'limit not named'}); it is not followed further.`;
+    case 'horizon':
+      return `The flaw stays acceptable for all ${Math.min(exact, LONGEST_STATED)} years it was followed${exact > LONGEST_STATED ? ' and beyond' : ''}; growth beyond the horizon was not looked at.`;
+    case 'no growth':
+      return 'No part of the flaw grows under the given cycles and rates.';
+    default:
+      return 'Growth is not followed further.';
+  }
+}

@@ -1,0 +1,120 @@
+import { toMPaSqrtM } from '../../units/convert';
+import type { ResidualStressInput } from '../assessment-input';
+import type { CalculationStep } from '../assessment-outcome';
+import type { SheetSubject } from '../calculation-sheet';
+import { number } from '../number-text';
+
+const RESIDUAL: Readonly<
+  Record<ResidualStressInput['state'], { formula: string; source: string }>
+> = {
+  none: { formula: 'none', source: 'Input' },
+  entered: { formula: 'as entered', source: 'Input' },
+  'as-welded': {
+    formula: 'min(σY, (1.4 − σref/σf) σY), σf = (σY + σU)/2',
+    source: 'BS 7910:2013 7.1.8.2 (from memory)',
+  },
+  'heat-treated': {
+    formula: '0.2 σY (flaw parallel to the weld), 0.3 σY (transverse)',
+    source: 'BS 7910:2013 7.1.8.3 (from memory)',
+  },
+};
+
+/** Stress, stress intensity and reference stress. */
+export function stressSteps(subject: SheetSubject): CalculationStep[] {
+  return [...referenceSteps(subject), ...residualSteps(subject), ...intensitySteps(subject)];
+}
+
+const sizes = ({ section, flaw }: SheetSubject) => [
+  `a = ${number(flaw.a)} mm`,
+  `c = ${number(flaw.c)} mm`,
+  `t = ${number(section.flaw.wall.thickness)} mm`,
+];
+
+const loads = ({ section: { flaw } }: SheetSubject) => [
+  `Pm = ${number(flaw.primaryMembrane)} MPa`,
+  `Pb = ${number(flaw.primaryBending)} MPa`,
+  ...(flaw.facePressure > 0 ? [`p on the faces = ${number(flaw.facePressure)} MPa`] : []),
+];
+
+function referenceSteps(subject: SheetSubject): CalculationStep[] {
+  const { referenceStress } = subject.section.evaluator.solutions;
+  const { material, facePressure } = subject.section.flaw;
+  const pressure = facePressure > 0 ? ' Pressure on the faces adds p a/t to Pm (equilibrium).' : '';
+  return [
+    {
+      group: 'Reference stress',
+      symbol: 'σref',
+      name: `${referenceStress.title}. ${referenceStress.basis}${pressure}`,
+      value: subject.point.referenceStress,
+      unit: 'MPa',
+      formula: referenceStress.formula,
+      source: referenceStress.source,
+      inputs: [...loads(subject), ...sizes(subject)],
+    },
+    {
+      group: 'Reference stress',
+      symbol: 'Lr',
+      name: 'Load ratio',
+      value: subject.point.lr,
+      unit: '',
+      formula: 'σref/σY',
+      source: 'BS 7910, R6: definition',
+      inputs: [
+        `σref = ${number(subject.point.referenceStress)} MPa`,
+        `σY = ${number(material.yieldMPa)} MPa`,
+      ],
+    },
+  ];
+}
+
+function residualSteps({ section, point }: SheetSubject): CalculationStep[] {
+  const { residual, material } = section.flaw;
+  const { formula, source } = RESIDUAL[residual.state];
+  const inputs = [
+    `σY = ${number(material.yieldMPa)} MPa`,
+    `σref = ${number(point.referenceStress)} MPa`,
+  ];
+  const step = (symbol: string, name: string, value: number): CalculationStep => ({
+    group: 'Residual stress',
+    symbol,
+    name,
+    value,
+    unit: 'MPa',
+    formula,
+    source,
+    inputs: residual.state === 'none' ? [] : inputs,
+  });
+  return [
+    step('Qm', 'Residual membrane stress', point.residualMembrane),
+    ...(point.residualBending === 0
+      ? []
+      : [step('Qb', 'Residual bending stress', point.residualBending)]),
+  ];
+}
+
+function intensitySteps(subject: SheetSubject): CalculationStep[] {
+  const { section, point } = subject;
+  const { stressIntensity } = section.evaluator.solutions;
+  const step = (
+    symbol: string,
+    name: string,
+    value: number,
+    stress: readonly string[],
+  ): CalculationStep => ({
+    group: 'Stress intensity',
+    symbol,
+    name: `${name} at φ = ${point.angle}°: ${stressIntensity.title}`,
+    value: toMPaSqrtM(value),
+    unit: 'MPa·√m',
+    formula: stressIntensity.formula,
+    source: stressIntensity.source,
+    inputs: [...stress, ...sizes(subject)],
+  });
+  return [
+    step('KIp', 'From primary stress', point.at.kPrimary, loads(subject)),
+    step('KIs', 'From residual stress', point.at.kSecondary, [
+      `Qm = ${number(point.residualMembrane)} MPa`,
+      `Qb = ${number(point.residualBending)} MPa`,
+    ]),
+  ];
+}
