@@ -4,6 +4,7 @@ import { answerFailure } from './http/answer-failure';
 import { clientFiles } from './http/client-files';
 import { Failure } from './http/failure';
 import { openApiDocument } from './http/openapi';
+import { limitPerMinute } from './http/rate-limit';
 import { giveRequestId } from './http/request-id';
 import { sameOriginOnly } from './http/same-origin';
 import { securityHeaders } from './http/security-headers';
@@ -11,6 +12,9 @@ import { Api } from './http/serve';
 import { databaseIdempotency } from './modules/auth/idempotency-store';
 import { authenticateWith } from './modules/auth/authenticate';
 import { serveModules } from './modules/serve-modules';
+
+/** A whole site may sit behind one network address; this only stops a flood. */
+const REQUESTS_PER_MINUTE = 30_000;
 
 /** Builds the product's HTTP side from its dependencies; it neither listens nor reads the environment. */
 export function createApp(
@@ -26,6 +30,7 @@ export function createApp(
     response.setHeader('Cache-Control', 'no-store');
     next();
   });
+  app.use('/api', limitPerMinute(REQUESTS_PER_MINUTE));
   app.use('/api', sameOriginOnly(deps.config.publicUrl), express.json({ limit: '256kb' }));
   const api = new Api(authenticateWith(deps), deps.clock, databaseIdempotency(deps.db));
   serveModules(api, deps);

@@ -15,7 +15,13 @@ export function limitPerMinute(limit: number): RequestHandler {
     validate: { xForwardedForHeader: false, trustProxy: false },
     handler: (_request, _response, next) => {
       next(
-        new Failure('rate-limited', 429, 'Too many requests', 'More requests came from your network address than this server takes. Try again in a minute.', { retryAfterSeconds: 60 }),
+        new Failure(
+          'rate-limited',
+          429,
+          'Too many requests',
+          'More requests came from your network address than this server takes. Try again in a minute.',
+          { retryAfterSeconds: 60 },
+        ),
       );
     },
   });

@@ -31,14 +31,19 @@ export async function acceptInvitation(
     await accountRepository(tx).setPassword(person.id, passwordHash, now, name);
     await sessionStore(tx, clock).endAllOf(person.id);
     const { siteId, role } = person;
-    await writeHistory(tx, { siteId, personId: person.id, name, role, requestId: source.requestId }, now, {
-      action: 'person.invitation-accepted',
-      entity: 'person',
-      entityId: person.id,
-      summary: `${name} accepted the invitation`,
-      before: { name: person.name, invited: true },
-      after: { name, invited: false },
-    });
+    await writeHistory(
+      tx,
+      { siteId, personId: person.id, name, role, requestId: source.requestId },
+      now,
+      {
+        action: 'person.invitation-accepted',
+        entity: 'person',
+        entityId: person.id,
+        summary: `${name} accepted the invitation`,
+        before: { name: person.name, invited: true },
+        after: { name, invited: false },
+      },
+    );
   });
   logSecurity(deps.log, 'invitation accepted', { personId: person.id, address: source.address });
   return openSession(deps, person.id, source);

@@ -90,4 +90,5 @@ const ENTITY: Readonly<Record<string, string>> = {
   "'": '&#39;',
 };
 
-const escaped = (text: string): string => text.replaceAll(/[&<>"']/g, (mark) => ENTITY[mark] ?? mark);
+const escaped = (text: string): string =>
+  text.replaceAll(/[&<>"']/g, (mark) => ENTITY[mark] ?? mark);

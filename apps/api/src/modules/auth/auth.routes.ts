@@ -36,7 +36,11 @@ export function serveAuth(api: Api, deps: Deps): void {
     limited,
   );
 
-  api.serve(requestPasswordResetRoute, ({ body }) => requestPasswordReset(deps, body.email), limited);
+  api.serve(
+    requestPasswordResetRoute,
+    ({ body }) => requestPasswordReset(deps, body.email),
+    limited,
+  );
 
   api.serve(
     resetPasswordRoute,

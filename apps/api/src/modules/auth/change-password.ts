@@ -64,6 +64,8 @@ async function confirmPassword(
     if (!(error instanceof Failure) || error.code !== 'sign-in.refused') throw error;
     // the session is good, so 401 would wrongly send the person to the sign-in page
     const message = 'This is not your password.';
-    throw new Failure('password.wrong', 422, 'Cannot be accepted', message, { errors: [{ field, message }] });
+    throw new Failure('password.wrong', 422, 'Cannot be accepted', message, {
+      errors: [{ field, message }],
+    });
   }
 }

@@ -41,7 +41,12 @@ export async function checkCredentials(deps: Deps, attempt: Attempt): Promise<Pe
   if (lockMilliseconds(failures) > 0) {
     logSecurity(log, 'account locked', { personId: person?.id ?? 'unknown', failures });
   }
-  throw new Failure('sign-in.refused', 401, 'Not signed in', 'The e-mail address or the password is not right, or this access has ended. Check both, or ask for a password reset.');
+  throw new Failure(
+    'sign-in.refused',
+    401,
+    'Not signed in',
+    'The e-mail address or the password is not right, or this access has ended. Check both, or ask for a password reset.',
+  );
 }
 
 async function refuseBusyAddress({ db, clock, log }: Deps, address: string): Promise<void> {
@@ -51,7 +56,13 @@ async function refuseBusyAddress({ db, clock, log }: Deps, address: string): Pro
   if (left <= 0) return;
   const seconds = Math.ceil(left / 1000);
   logSecurity(log, 'address limited', { address });
-  throw new Failure('sign-in.address-limited', 429, 'Too many failed attempts', `Too many failed attempts came from your network address. Try again in ${waitInWords(seconds)}.`, { retryAfterSeconds: seconds });
+  throw new Failure(
+    'sign-in.address-limited',
+    429,
+    'Too many failed attempts',
+    `Too many failed attempts came from your network address. Try again in ${waitInWords(seconds)}.`,
+    { retryAfterSeconds: seconds },
+  );
 }
 
 /** An address nobody has is locked by the same rule, so that a lock does not tell who exists. */
@@ -73,11 +84,19 @@ async function forgetFailures({ db, clock }: Deps, personId: string): Promise<vo
   });
 }
 
-async function countFailure({ db, clock }: Deps, attempt: Attempt, person?: Person): Promise<number> {
+async function countFailure(
+  { db, clock }: Deps,
+  attempt: Attempt,
+  person?: Person,
+): Promise<number> {
   const now = clock.now();
   return db.transaction(async (tx) => {
     const throttle = throttleRepository(tx);
-    await throttle.countInWindow(throttleKey('address', attempt.address), now, ADDRESS_WINDOW_MILLISECONDS);
+    await throttle.countInWindow(
+      throttleKey('address', attempt.address),
+      now,
+      ADDRESS_WINDOW_MILLISECONDS,
+    );
     if (person) return countForPerson(accountRepository(tx), person.id, now);
     const key = throttleKey('account', attempt.email);
     const before = await throttle.read(key);

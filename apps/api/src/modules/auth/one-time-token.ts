@@ -54,7 +54,10 @@ const live = (purpose: Purpose, token: string, now: Date) =>
 
 /** Whom a token that still works is for. */
 export async function readToken(db: Database, purpose: Purpose, token: string, now: Date) {
-  const [row] = await db.select().from(oneTimeTokens).where(live(purpose, token, now));
+  const [row] = await db
+    .select()
+    .from(oneTimeTokens)
+    .where(live(purpose, token, now));
   if (!row) throw spent(purpose);
   return row;
 }
@@ -77,4 +80,9 @@ const NEXT_STEP: Readonly<Record<Purpose, string>> = {
 };
 
 const spent = (purpose: Purpose) =>
-  new Failure('token.spent', 410, 'This link no longer works', `It was used already, has expired, or was replaced by a newer one. ${NEXT_STEP[purpose]}`);
+  new Failure(
+    'token.spent',
+    410,
+    'This link no longer works',
+    `It was used already, has expired, or was replaced by a newer one. ${NEXT_STEP[purpose]}`,
+  );

@@ -29,7 +29,8 @@ export async function openSite(
     number: 1,
     effectiveOn: siteDay(now, timeZone),
     rules: DEFAULT_SITE_RULES,
-    reason: 'Rules a new site starts with: common practice, to be replaced by the owner’s procedure.',
+    reason:
+      'Rules a new site starts with: common practice, to be replaced by the owner’s procedure.',
     createdBy: by.name,
     createdAt: now,
   };

@@ -12,7 +12,11 @@ const PRODUCT = 'ligament';
 const SHORTEST_NAME = 4;
 
 /** Refuses a password that is easily guessed; its length has been checked by the contract. */
-export function refuseWeakPassword(password: string, context: PasswordContext, field = 'password'): void {
+export function refuseWeakPassword(
+  password: string,
+  context: PasswordContext,
+  field = 'password',
+): void {
   const problem = weakness(password, context);
   if (problem) throw unacceptable('password.weak', problem, field);
 }
@@ -41,9 +45,20 @@ function guessable({ name, email, siteName }: PasswordContext): string[] {
 }
 
 /** Words that stand in a site's name and in any sentence. */
-const EVERYDAY = new Set(['works', 'plant', 'site', 'unit', 'test', 'north', 'south', 'east', 'west']);
+const EVERYDAY = new Set([
+  'works',
+  'plant',
+  'site',
+  'unit',
+  'test',
+  'north',
+  'south',
+  'east',
+  'west',
+]);
 
-const lettersAndDigits = (text: string): string => text.normalize('NFC').replaceAll(/[^\p{L}\p{N}]/gu, '');
+const lettersAndDigits = (text: string): string =>
+  text.normalize('NFC').replaceAll(/[^\p{L}\p{N}]/gu, '');
 
 /** `aaaaaaaaaaaaaaa`, `abcabcabcabcabc`: at most four characters over and over. */
 const isOneThingRepeated = (text: string): boolean => /^(.{1,4}?)\1+$/u.test(text);

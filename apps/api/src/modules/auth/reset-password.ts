@@ -29,7 +29,8 @@ export async function requestPasswordReset(deps: Deps, email: string): Promise<{
   }
   await sent;
   return {
-    detail: 'If this address belongs to somebody with access, a mail with a link is on its way. The link works for 30 minutes.',
+    detail:
+      'If this address belongs to somebody with access, a mail with a link is on its way. The link works for 30 minutes.',
   };
 }
 

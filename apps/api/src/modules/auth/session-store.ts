@@ -47,7 +47,10 @@ export function sessionStore(db: Database, clock: Clock) {
   const lucia = luciaOn(db);
   return {
     /** Opens a session; the answer holds the cookie that carries it. */
-    async open(personId: string, source: SessionSource): Promise<{ id: string; setCookie: string }> {
+    async open(
+      personId: string,
+      source: SessionSource,
+    ): Promise<{ id: string; setCookie: string }> {
       const now = clock.now();
       await db.delete(sessions).where(and(eq(sessions.userId, personId), endedBy(now)));
       const { id } = await lucia.createSession(personId, {

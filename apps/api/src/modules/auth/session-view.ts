@@ -17,7 +17,13 @@ export async function sessionView(db: Database, sessionId: string): Promise<Sess
       role: person.role,
       organisation: person.organisation,
     },
-    site: { id: site.id, code: site.code, name: site.name, timeZone: site.timeZone, demo: site.demo },
+    site: {
+      id: site.id,
+      code: site.code,
+      name: site.name,
+      timeZone: site.timeZone,
+      demo: site.demo,
+    },
     expiresAt: new Date(ends).toISOString(),
   };
 }

@@ -61,6 +61,10 @@ function refuseUnknownTimeZone(timeZone: string): void {
     Intl.DateTimeFormat('en-GB', { timeZone });
   } catch (error) {
     if (!(error instanceof RangeError)) throw error;
-    throw unacceptable('site.time-zone', 'Give a time zone by its name, such as Europe/London.', 'timeZone');
+    throw unacceptable(
+      'site.time-zone',
+      'Give a time zone by its name, such as Europe/London.',
+      'timeZone',
+    );
   }
 }

@@ -13,7 +13,11 @@ export interface CurrentSiteRules {
 /** The rules in force: the version recorded last, since a version takes effect no later than the day it is recorded. */
 export async function currentSiteRules(db: Database, siteId: string): Promise<CurrentSiteRules> {
   const [row] = await db
-    .select({ id: siteRuleVersions.id, number: siteRuleVersions.number, rules: siteRuleVersions.rules })
+    .select({
+      id: siteRuleVersions.id,
+      number: siteRuleVersions.number,
+      rules: siteRuleVersions.rules,
+    })
     .from(siteRuleVersions)
     .where(eq(siteRuleVersions.siteId, siteId))
     .orderBy(desc(siteRuleVersions.number))
