@@ -5,6 +5,11 @@ import { serveSiteRules } from './site-rules/site-rules.routes';
 import { servePeople } from './people/people.routes';
 import { serveHistory } from './history/history.routes';
 import { serveHealth } from './health/health.routes';
+import { serveComponents } from './components/components.routes';
+import { serveGrowthLaws } from './growth-laws/growth-laws.routes';
+import { serveMaterials } from './materials/materials.routes';
+import { serveSearch } from './search/search.routes';
+import { serveUnits } from './units/units.routes';
 
 /** Every module's routes, in one list. */
 export function serveModules(api: Api, deps: Deps): void {
@@ -13,4 +18,9 @@ export function serveModules(api: Api, deps: Deps): void {
   servePeople(api, deps);
   serveHistory(api, deps);
   serveHealth(api, deps);
+  serveUnits(api, deps);
+  serveMaterials(api, deps);
+  serveGrowthLaws(api, deps);
+  serveComponents(api, deps);
+  serveSearch(api, deps);
 }
