@@ -4,6 +4,7 @@ import type { Logger } from 'pino';
 import { DatabaseUnavailable, StorageFull } from '../db/database-failures';
 import { Failure } from './failure';
 import { requestId } from './request-id';
+import { logSecurity } from './security-log';
 
 /** The one place that answers failures, as RFC 9457 problem details; unknown ones are logged whole and answered blandly. */
 export function answerFailure(log: Logger): ErrorRequestHandler {
@@ -15,6 +16,15 @@ export function answerFailure(log: Logger): ErrorRequestHandler {
     const failure = asFailure(error);
     if (failure.status >= 500)
       log.error({ err: error, requestId: requestId(response) }, failure.code);
+    if (failure.status === 403 || failure.status === 429) {
+      const { method, path } = request;
+      logSecurity(log, 'denied', {
+        code: failure.code,
+        method,
+        path,
+        requestId: requestId(response),
+      });
+    }
     if (failure.more.retryAfterSeconds !== undefined) {
       response.setHeader('Retry-After', String(failure.more.retryAfterSeconds));
     }

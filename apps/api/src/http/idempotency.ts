@@ -38,8 +38,35 @@ export async function idempotent(
       'An Idempotency-Key is 8 to 100 letters, digits, _ or -.',
     );
   }
+  const asked = { personId: actor.personId, key, request };
+  return send(response, await inTurn(`${actor.personId} ${key}`, () => once(store, asked, work)));
+}
+
+const underWay = new Map<string, Promise<unknown>>();
+
+/** A second click waits for the first, so that it finds the answer instead of doing the work again. */
+async function inTurn<T>(name: string, work: () => Promise<T>): Promise<T> {
+  const before = underWay.get(name) ?? Promise.resolve();
+  const mine = before.then(work, work);
+  underWay.set(name, mine);
+  try {
+    return await mine;
+  } finally {
+    if (underWay.get(name) === mine) underWay.delete(name);
+  }
+}
+
+async function once(
+  store: IdempotencyStore,
+  {
+    personId,
+    key,
+    request,
+  }: { readonly personId: string; readonly key: string; readonly request: Request },
+  work: () => Promise<Outcome>,
+): Promise<Outcome> {
   const hash = requestHash(request);
-  const kept = await store.find(actor.personId, key);
+  const kept = await store.find(personId, key);
   if (kept && kept.requestHash !== hash) {
     throw new Failure(
       'idempotency-key.reused',
@@ -48,15 +75,14 @@ export async function idempotent(
       'This Idempotency-Key was used for a different request.',
     );
   }
-  if (kept)
-    return send(response, { status: kept.status, body: JSON.parse(kept.answer) as unknown });
+  if (kept) return { status: kept.status, body: JSON.parse(kept.answer) as unknown };
   const outcome = await work();
-  await store.keep(actor.personId, key, request.path, {
+  await store.keep(personId, key, request.path, {
     requestHash: hash,
     status: outcome.status,
     answer: JSON.stringify(outcome.body ?? null),
   });
-  return send(response, outcome);
+  return outcome;
 }
 
 function send(response: Response, { status, body }: Outcome): void {
