@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { above0, between, id, line, reason, version } from './primitives';
 import { route } from './route';
 

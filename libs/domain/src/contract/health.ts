@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { route } from './route';
 
 export const readHealth = route({

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import type { Action } from './policy';
 
 /** How a request of a route proves who it is: a signed-in person who may do the action, or nobody yet. */

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { id, instant, isoDate, reason } from './primitives';
 import { route } from './route';
 import { siteRules } from './site-rules';

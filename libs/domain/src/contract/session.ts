@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { ROLES } from './policy';
 import { id, instant, line } from './primitives';
 import { route } from './route';

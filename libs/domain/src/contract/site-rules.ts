@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { between } from './primitives';
 import { MECHANISMS, TECHNIQUES } from './vocabulary';
 
