@@ -82,11 +82,15 @@ function runSection(
     const states = [{ years: 0, ...size }];
     return { stop: 'limit', limit: spent.key, states, distance: 0, evaluations: 0 };
   }
-  const first = integrateGrowth(size, rates, limits, { horizonYears });
-  if (first.states.length > DRAWN_STATES || first.distance === 0) return first;
+  // long steps first, to learn how far the way goes; then steps short enough to draw and to meet every limit
+  const scout = integrateGrowth(size, rates, limits, {
+    horizonYears,
+    maxStep: 0.5,
+    tolerance: 1e-3,
+  });
   return integrateGrowth(size, rates, limits, {
     horizonYears,
-    maxStep: Math.min(first.distance / DRAWN_STATES, 0.1),
+    maxStep: Math.min(Math.max(scout.distance, 1e-4) / DRAWN_STATES, 0.1),
   });
 }
 

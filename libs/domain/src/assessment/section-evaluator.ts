@@ -7,7 +7,7 @@ import type { Crack } from '../geometry/crack';
 import type { Degrees, MPa } from '../units/quantity';
 import type { FlawCase } from './flaw-case';
 
-const ANGLE_STEP = 5;
+const ANGLE_STEP = 10;
 /** Angles of the front that are assessed [°]; the last is the deepest point. */
 export const FRONT_ANGLES: readonly Degrees[] = Array.from(
   { length: 90 / ANGLE_STEP + 1 },

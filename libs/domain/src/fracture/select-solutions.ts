@@ -1,6 +1,21 @@
+import {
+  CYLINDER_CIRCUMFERENTIAL_OUTSIDE_REFERENCE,
+  CYLINDER_CIRCUMFERENTIAL_REFERENCE,
+} from './reference-stress/cylinder-circumferential-reference';
+import {
+  CYLINDER_AXIAL_OUTSIDE_REFERENCE,
+  CYLINDER_AXIAL_REFERENCE,
+} from './reference-stress/cylinder-axial-reference';
 import { PLATE_EMBEDDED_REFERENCE } from './reference-stress/plate-embedded-reference';
 import { PLATE_SURFACE_REFERENCE } from './reference-stress/plate-surface-reference';
 import type { ReferenceStressSolution } from './reference-stress/solution';
+import { CYLINDER_EMBEDDED_K } from './stress-intensity/cylinder-embedded-k';
+import {
+  CYLINDER_AXIAL_INSIDE_K,
+  CYLINDER_AXIAL_OUTSIDE_K,
+  CYLINDER_CIRCUMFERENTIAL_INSIDE_K,
+  CYLINDER_CIRCUMFERENTIAL_OUTSIDE_K,
+} from './stress-intensity/cylinder-surface-k';
 import { PLATE_EMBEDDED_K } from './stress-intensity/plate-embedded-k';
 import { PLATE_SURFACE_K } from './stress-intensity/plate-surface-k';
 import type { StressIntensitySolution } from './stress-intensity/solution';
@@ -19,9 +34,31 @@ export interface ChosenSolutions {
   readonly referenceStress: ReferenceStressSolution;
 }
 
-/** Chooses the published solutions by geometry and flaw: one place, so that a new solution is one more line. */
-export function selectSolutions({ kind }: FlawSituation): ChosenSolutions {
-  return kind === 'surface'
-    ? { stressIntensity: PLATE_SURFACE_K, referenceStress: PLATE_SURFACE_REFERENCE }
-    : { stressIntensity: PLATE_EMBEDDED_K, referenceStress: PLATE_EMBEDDED_REFERENCE };
+const pair = (
+  stressIntensity: StressIntensitySolution,
+  referenceStress: ReferenceStressSolution,
+): ChosenSolutions => ({ stressIntensity, referenceStress });
+
+/** The catalogue by situation: a new solution is one new file and one line here. */
+export const CATALOGUE = {
+  'plate surface': pair(PLATE_SURFACE_K, PLATE_SURFACE_REFERENCE),
+  'plate embedded': pair(PLATE_EMBEDDED_K, PLATE_EMBEDDED_REFERENCE),
+  'cylinder embedded': pair(CYLINDER_EMBEDDED_K, PLATE_EMBEDDED_REFERENCE),
+  'axial inside': pair(CYLINDER_AXIAL_INSIDE_K, CYLINDER_AXIAL_REFERENCE),
+  'axial outside': pair(CYLINDER_AXIAL_OUTSIDE_K, CYLINDER_AXIAL_OUTSIDE_REFERENCE),
+  'circumferential inside': pair(
+    CYLINDER_CIRCUMFERENTIAL_INSIDE_K,
+    CYLINDER_CIRCUMFERENTIAL_REFERENCE,
+  ),
+  'circumferential outside': pair(
+    CYLINDER_CIRCUMFERENTIAL_OUTSIDE_K,
+    CYLINDER_CIRCUMFERENTIAL_OUTSIDE_REFERENCE,
+  ),
+} as const satisfies Readonly<Record<string, ChosenSolutions>>;
+
+/** Chooses the published solutions by geometry and flaw. */
+export function selectSolutions(situation: FlawSituation): ChosenSolutions {
+  const { shape, kind, face, orientation } = situation;
+  if (kind === 'embedded') return CATALOGUE[`${shape} embedded`];
+  return shape === 'plate' ? CATALOGUE['plate surface'] : CATALOGUE[`${orientation} ${face}`];
 }

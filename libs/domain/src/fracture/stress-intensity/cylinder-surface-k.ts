@@ -1,0 +1,112 @@
+import type { Crack } from '../../geometry/crack';
+import type { Limit } from '../../geometry/limit';
+import type { Degrees } from '../../units/quantity';
+import { curvatureShare } from './curvature-factor';
+import {
+  AXIAL_INSIDE,
+  AXIAL_OUTSIDE,
+  CIRCUMFERENTIAL_INSIDE,
+  CURVATURE_SOURCE,
+  type CurvatureTable,
+} from './curvature-table';
+import { PLATE_SURFACE_K, PLATE_SURFACE_LIMITS, plateSurfaceInfluence } from './plate-surface-k';
+import type { Influence, StressIntensitySolution } from './solution';
+
+const SOURCE = `${PLATE_SURFACE_K.source}; curvature: ${CURVATURE_SOURCE}`;
+
+const WALL_LIMIT: Limit = {
+  name: 'Ri/t',
+  text: 'Ri/t ≥ 5',
+  min: 5,
+  max: Infinity,
+  measure: ({ insideRadius, thickness }) => insideRadius / thickness,
+  source: CURVATURE_SOURCE,
+  input: 'wall.insideDiameterMm',
+  instead: 'Ask a specialist for a thick-wall solution with influence coefficients.',
+};
+
+const bulgingLimit = (table: CurvatureTable): Limit => ({
+  name: 'curvature correction',
+  text: 'curvature raises K at the deepest point by at most 50 %',
+  min: -1,
+  max: 0.5,
+  measure: (crack) => curvatureShare(table.uniform, crack, 90 as Degrees),
+  source: CURVATURE_SOURCE,
+  input: 'flaw.lengthMm',
+  instead:
+    'Ask a specialist for a shell analysis of this long flaw, or assess it as fully extended.',
+});
+
+/**
+ * K of a semi-elliptical surface crack in a cylinder, per unit of stress: the plate's uniform and linear
+ * coefficients G0 and G1, each changed by curvature; bending is G0 − 2 (a/t) G1.
+ * @param crack crack and wall: a, c, t, Ri [mm]
+ * @param angle parametric angle φ, 90 at the deepest point [°]
+ * @param into receives K per unit of membrane and bending stress [√mm]
+ * @param table rows of the curvature effect [-]
+ * @returns nothing; the answer stands in `into` [√mm]
+ * @validity limits of the plate; Ri/t ≥ 5; correction at most 50 %
+ * @source Newman and Raju, NASA TM-85793 (1984); curvature from own finite elements at Ri/t = 10
+ * @example at(cylinderSurfaceInfluence, { a: 2, c: 10, t: 10, Ri: 1e9 }, 90, AXIAL_INSIDE).membrane // 2.7535
+ */
+export function cylinderSurfaceInfluence(
+  crack: Crack,
+  angle: Degrees,
+  into: Influence,
+  table: CurvatureTable,
+): void {
+  plateSurfaceInfluence(crack, angle, into);
+  const uniform = into.membrane;
+  // 2 (a/t) G1 of the plate: what bending lacks against membrane
+  const linear = uniform - into.bending;
+  into.membrane = uniform * (1 + curvatureShare(table.uniform, crack, angle));
+  into.bending = into.membrane - linear * (1 + curvatureShare(table.linear, crack, angle));
+  into.reversedBending = -into.bending;
+}
+
+const cylinderSolution = (
+  key: string,
+  title: string,
+  table: CurvatureTable,
+  accuracy: string,
+): StressIntensitySolution => ({
+  key,
+  title,
+  source: SOURCE,
+  formula:
+    'K = plate value of G0 and G1, each times (1 + curvature share); σm G0 + σb (G0 − 2 (a/t) G1)',
+  accuracy,
+  limits: [...PLATE_SURFACE_LIMITS, WALL_LIMIT, bulgingLimit(table)],
+  influence: (crack, angle, into) => cylinderSurfaceInfluence(crack, angle, into, table),
+});
+
+export const CYLINDER_AXIAL_INSIDE_K = cylinderSolution(
+  'cylinder-axial-inside',
+  'Axial semi-elliptical flaw, inside a cylinder',
+  AXIAL_INSIDE,
+  'Within 5 % of finite elements at Ri/t = 10 for the deepest point.',
+);
+
+export const CYLINDER_AXIAL_OUTSIDE_K = cylinderSolution(
+  'cylinder-axial-outside',
+  'Axial semi-elliptical flaw, outside a cylinder',
+  AXIAL_OUTSIDE,
+  'Within 5 % of finite elements at Ri/t = 10 for the deepest point.',
+);
+
+export const CYLINDER_CIRCUMFERENTIAL_INSIDE_K = cylinderSolution(
+  'cylinder-circumferential-inside',
+  'Circumferential semi-elliptical flaw, inside a cylinder',
+  CIRCUMFERENTIAL_INSIDE,
+  'Within 5 % of finite elements at Ri/t = 10, a/c = 0.2; less reduction than computed elsewhere.',
+);
+
+/** No finite-element rows exist for this one: the plate is never below the held cylinder. */
+export const CYLINDER_CIRCUMFERENTIAL_OUTSIDE_K: StressIntensitySolution = {
+  ...PLATE_SURFACE_K,
+  key: 'cylinder-circumferential-outside',
+  title: 'Circumferential semi-elliptical flaw, outside a cylinder',
+  accuracy:
+    'Plate value without the relief a cylinder gives: an upper estimate (a full-circumference outside crack stays below the long plate crack at every wall computed).',
+  limits: [...PLATE_SURFACE_LIMITS, WALL_LIMIT],
+};
