@@ -8,6 +8,7 @@ import { limitPerMinute } from './http/rate-limit';
 import { giveRequestId } from './http/request-id';
 import { sameOriginOnly } from './http/same-origin';
 import { securityHeaders } from './http/security-headers';
+import { shallowBody } from './http/shallow-body';
 import { Api } from './http/serve';
 import { databaseIdempotency } from './modules/auth/idempotency-store';
 import { authenticateWith } from './modules/auth/authenticate';
@@ -31,7 +32,12 @@ export function createApp(
     next();
   });
   app.use('/api', limitPerMinute(REQUESTS_PER_MINUTE));
-  app.use('/api', sameOriginOnly(deps.config.publicUrl), express.json({ limit: '256kb' }));
+  app.use(
+    '/api',
+    sameOriginOnly(deps.config.publicUrl),
+    express.json({ limit: '256kb' }),
+    shallowBody,
+  );
   const api = new Api(authenticateWith(deps), deps.clock, databaseIdempotency(deps.db));
   serveModules(api, deps);
   app.use(api.router);

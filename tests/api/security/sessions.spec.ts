@@ -24,7 +24,8 @@ describe('sessions', () => {
     expect(answer.status).toBe(201);
     const set = String(answer.headers['set-cookie']);
     expect(set).toMatch(/^__Host-ligament=[a-z0-9]{40};/);
-    for (const part of ['HttpOnly', 'Secure', 'SameSite=Strict', 'Path=/']) expect(set).toContain(part);
+    for (const part of ['HttpOnly', 'Secure', 'SameSite=Strict', 'Path=/'])
+      expect(set).toContain(part);
     expect(set).not.toMatch(/Domain=/i);
     expect(answer.body.user).toMatchObject({ id: planner.id, role: 'planner' });
     const seen = await withCookie(cookieOf(answer)).get('/api/session');
