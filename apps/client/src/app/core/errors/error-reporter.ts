@@ -1,4 +1,4 @@
-import { ErrorHandler, inject, Injectable, signal } from '@angular/core';
+import { type ErrorHandler, inject, Injectable, signal } from '@angular/core';
 import { LiveAnnouncer } from '@angular/cdk/a11y';
 
 /** Shows an unexpected error of the page itself in one place, instead of failing in silence. */

@@ -36,7 +36,7 @@ export class Session {
   }
 
   signOut(): Observable<void> {
-    return this.http.delete<void>('/api/session').pipe(
+    return this.http.delete('/api/session').pipe(
       map(() => undefined),
       tap(() => this.forget()),
     );
@@ -44,7 +44,7 @@ export class Session {
 
   /** Gives the password again before a sign-off. */
   prove(password: string): Observable<void> {
-    return this.http.post<void>('/api/session/proof', { password });
+    return this.http.post('/api/session/proof', { password }).pipe(map(() => undefined));
   }
 
   remember(view: SessionView | null): void {

@@ -17,5 +17,5 @@ export class FailedState {
     readonly detail: string;
     readonly errors: readonly { readonly field: string; readonly message: string }[];
   }>();
-  readonly again = output<void>();
+  readonly again = output();
 }

@@ -1,5 +1,5 @@
 import { inject, Injectable } from '@angular/core';
-import { ActivatedRoute, Router } from '@angular/router';
+import { type ActivatedRoute, Router } from '@angular/router';
 
 /** Keeps a list's search, filters, sort and page in the address, so that it can be bookmarked and shared. */
 @Injectable({ providedIn: 'root' })

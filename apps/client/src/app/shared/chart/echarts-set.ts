@@ -1,0 +1,25 @@
+// The parts of ECharts that our charts use; loaded only with the first chart.
+import { CustomChart, LineChart, ScatterChart } from 'echarts/charts';
+import {
+  GridComponent,
+  MarkAreaComponent,
+  MarkLineComponent,
+  MarkPointComponent,
+  TooltipComponent,
+} from 'echarts/components';
+import { init, use } from 'echarts/core';
+import { SVGRenderer } from 'echarts/renderers';
+
+use([
+  CustomChart,
+  LineChart,
+  ScatterChart,
+  GridComponent,
+  MarkAreaComponent,
+  MarkLineComponent,
+  MarkPointComponent,
+  TooltipComponent,
+  SVGRenderer,
+]);
+
+export { init };
