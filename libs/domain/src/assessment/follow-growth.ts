@@ -107,7 +107,10 @@ function limitsOf(section: Section): GrowthLimit[] {
 
 function rateFunction(section: Section, drivers: Drivers) {
   const { evaluator, crackAt } = section;
-  const perYear = ratesPerYear(drivers, { deepest: evaluator.deepest, end: evaluator.end });
+  const perYear = ratesPerYear(drivers, {
+    deepest: (membrane, bending) => evaluator.deepest(membrane, bending),
+    end: (membrane, bending) => evaluator.end(membrane, bending),
+  });
   return (a: number, c: number, into: Rates) => {
     evaluator.takeEnds(crackAt(a, c));
     perYear(into);

@@ -1,19 +1,20 @@
 import { selectSolutions, type ChosenSolutions } from '../fracture/select-solutions';
 import { interaction } from '../fracture/fad/interaction';
 import { lrMax, optionOne } from '../fracture/fad/option-one';
-import { heatTreatedResidual, relaxedResidual } from '../fracture/fad/residual-stress';
 import { combine, type Influence } from '../fracture/stress-intensity/solution';
 import type { Crack } from '../geometry/crack';
 import type { Degrees, MPa } from '../units/quantity';
 import type { FlawCase } from './flaw-case';
+import { fixedResidual, residualMembraneAt } from './residual-at';
 
 const ANGLE_STEP = 10;
-/** Angles of the front that are assessed [°]; the last is the deepest point. */
+/** Angles of the front that are assessed [°]: from the end of the flaw to the deepest point. */
 export const FRONT_ANGLES: readonly Degrees[] = Array.from(
   { length: 90 / ANGLE_STEP + 1 },
   (_, i) => (i * ANGLE_STEP) as Degrees,
 );
-const LAST = FRONT_ANGLES.length - 1;
+const END = 0;
+const DEEPEST = FRONT_ANGLES.length - 1;
 
 /** One point of the diagram: the highest Kr of the front at one factor on the primary load. */
 export interface DiagramPoint {
@@ -34,122 +35,95 @@ export interface FrontState {
   readonly kr: number;
 }
 
-/** Evaluates one crack against the diagram, at any factor on the primary load. */
-export interface SectionEvaluator {
+/**
+ * Evaluates one crack against the diagram, at any factor on the primary load. `take` a crack first: all
+ * else speaks of it until the next one. The front is kept in room of its own, so that growth and root
+ * searches allocate next to nothing.
+ */
+export class SectionEvaluator {
   readonly solutions: ChosenSolutions;
   readonly lrMax: number;
-  /** Takes up a crack: everything below speaks of it until the next one. */
-  readonly take: (crack: Crack) => void;
-  /** Takes up only the deepest point and the end, all that growth needs. */
-  readonly takeEnds: (crack: Crack) => void;
-  /** Point of the diagram at a factor on the primary load. */
-  readonly point: (loadFactor: number) => DiagramPoint;
-  /** One place of the front at a factor on the primary load. */
-  readonly frontAt: (index: number, loadFactor: number) => FrontState;
-  /** Room left to the line: above 0 inside, continuous but for the jump of a yield plateau. */
-  readonly margin: (loadFactor: number) => number;
-  /** K from a range of stress at the deepest point and at the end of the crack [MPa·√mm]. */
-  readonly deepest: (membrane: number, bending: number) => number;
-  readonly end: (membrane: number, bending: number) => number;
-}
+  private readonly front: readonly Influence[];
+  private readonly facePressure: number;
+  private reference = 0;
 
-/** An evaluator for the kind of flaw the case names, with its own scratch room: calls allocate little. */
-export function sectionEvaluator(flaw: FlawCase): SectionEvaluator {
-  const solutions = selectSolutions(flaw.situation);
-  const front = FRONT_ANGLES.map((): Influence => ({
-    membrane: 0,
-    bending: 0,
-    reversedBending: 0,
-  }));
-  const at = (index: number) => front[index] as Influence;
-  const surface = flaw.situation.kind === 'surface';
-  const facePressure = surface ? flaw.facePressure : 0;
-  const cutOff = lrMax(flaw.material);
-  let unitReference = 0;
-  let residualAtService = 0;
+  constructor(private readonly flaw: FlawCase) {
+    this.solutions = selectSolutions(flaw.situation);
+    this.lrMax = lrMax(flaw.material);
+    this.front = FRONT_ANGLES.map(() => ({ membrane: 0, bending: 0, reversedBending: 0 }));
+    this.facePressure = flaw.situation.kind === 'surface' ? flaw.facePressure : 0;
+  }
 
-  const residualMembrane = (factor: number): number => {
-    if (flaw.residual.state !== 'as-welded') return fixedResidual(flaw).membrane;
-    // a load never seen relaxes nothing; a smaller one leaves more
-    return factor >= 1 ? residualAtService : relaxed(flaw, factor * unitReference);
-  };
-  const { bending: residualBending } = fixedResidual(flaw);
-
-  const fill = (crack: Crack, index: number) =>
-    solutions.stressIntensity.influence(crack, FRONT_ANGLES[index] as Degrees, at(index));
-  const takeEnds = (crack: Crack) => {
-    fill(crack, 0);
-    fill(crack, LAST);
-  };
-  const take = (crack: Crack) => {
-    for (let i = 0; i <= LAST; i++) fill(crack, i);
+  /** Takes up a crack, its whole front and its reference stress. */
+  take(crack: Crack): void {
+    for (let i = 0; i <= DEEPEST; i++) this.fill(crack, i);
     // pressure in a fully long crack adds p a/t to the force through the wall (equilibrium)
-    const membrane = flaw.primaryMembrane + (facePressure * crack.a) / crack.thickness;
-    unitReference = solutions.referenceStress.stress(
-      crack,
-      membrane as MPa,
-      flaw.primaryBending as MPa,
-    );
-    residualAtService = relaxed(flaw, unitReference);
-  };
-  const frontAt = (index: number, factor: number): FrontState =>
-    place(at(index), factor, residualMembrane(factor));
-  const place = (influence: Influence, factor: number, residual: number): FrontState => {
-    const membrane = flaw.primaryMembrane + facePressure;
-    const kPrimary = factor * combine(influence, membrane, flaw.primaryBending);
-    const kSecondary = combine(influence, residual, residualBending);
-    const rho = interaction(
-      kPrimary,
-      kSecondary,
-      (factor * unitReference) / flaw.material.yieldMPa,
-    );
-    return { kPrimary, kSecondary, rho, kr: (kPrimary + kSecondary) / flaw.toughness + rho };
-  };
-  const point = (factor: number): DiagramPoint => {
-    const residual = residualMembrane(factor);
-    let governing = LAST;
+    const membrane = this.flaw.primaryMembrane + (this.facePressure * crack.a) / crack.thickness;
+    const { stress } = this.solutions.referenceStress;
+    this.reference = stress(crack, membrane as MPa, this.flaw.primaryBending as MPa);
+  }
+
+  /** Takes up only the deepest point and the end, all that growth needs. */
+  takeEnds(crack: Crack): void {
+    this.fill(crack, END);
+    this.fill(crack, DEEPEST);
+  }
+
+  /** Point of the diagram at a factor on the primary load. */
+  point(factor: number): DiagramPoint {
+    const { flaw } = this;
+    let governing = DEEPEST;
     let kr = 0;
-    for (let i = 0; i <= LAST; i++) {
-      const here = place(at(i), factor, residual).kr;
+    for (let i = 0; i <= DEEPEST; i++) {
+      const here = this.frontAt(i, factor).kr;
       if (here >= kr) [kr, governing] = [here, i];
     }
-    const referenceStress = factor * unitReference;
+    const referenceStress = factor * this.reference;
     return {
       lr: referenceStress / flaw.material.yieldMPa,
       kr,
       referenceStress,
-      residualMembrane: residual,
-      residualBending,
+      residualMembrane: residualMembraneAt(flaw, this.reference, factor),
+      residualBending: fixedResidual(flaw).bending,
       governing,
     };
-  };
-  const margin = (factor: number): number => {
-    const { lr, kr } = point(factor);
-    return Math.min(optionOne(lr, flaw.material) - kr, cutOff - lr);
-  };
-  return {
-    solutions,
-    lrMax: cutOff,
-    take,
-    takeEnds,
-    point,
-    frontAt,
-    margin,
-    deepest: (membrane, bending) => combine(at(LAST), membrane, bending),
-    end: (membrane, bending) => combine(at(0), membrane, bending),
-  };
-}
+  }
 
-const relaxed = ({ material }: FlawCase, reference: number) =>
-  relaxedResidual(reference, material.yieldMPa, material.tensileMPa);
+  /** One place of the front at a factor on the primary load. */
+  frontAt(index: number, factor: number): FrontState {
+    const { flaw } = this;
+    const influence = this.at(index);
+    const membrane = flaw.primaryMembrane + this.facePressure;
+    const kPrimary = factor * combine(influence, membrane, flaw.primaryBending);
+    const residual = residualMembraneAt(flaw, this.reference, factor);
+    const kSecondary = combine(influence, residual, fixedResidual(flaw).bending);
+    const lr = (factor * this.reference) / flaw.material.yieldMPa;
+    const rho = interaction(kPrimary, kSecondary, lr);
+    return { kPrimary, kSecondary, rho, kr: (kPrimary + kSecondary) / flaw.toughness + rho };
+  }
 
-function fixedResidual({ residual, material }: FlawCase): { membrane: number; bending: number } {
-  switch (residual.state) {
-    case 'entered':
-      return { membrane: residual.membraneMPa.value, bending: residual.bendingMPa.value };
-    case 'heat-treated':
-      return { membrane: heatTreatedResidual(residual.flawToWeld, material.yieldMPa), bending: 0 };
-    default:
-      return { membrane: 0, bending: 0 };
+  /** Room left to the line: above 0 inside, continuous but for the jump of a yield plateau. */
+  margin(factor: number): number {
+    const { lr, kr } = this.point(factor);
+    return Math.min(optionOne(lr, this.flaw.material) - kr, this.lrMax - lr);
+  }
+
+  /** K from a range of stress at the deepest point [MPa·√mm]. */
+  deepest(membrane: number, bending: number): number {
+    return combine(this.at(DEEPEST), membrane, bending);
+  }
+
+  /** K from a range of stress at the end of the flaw [MPa·√mm]. */
+  end(membrane: number, bending: number): number {
+    return combine(this.at(END), membrane, bending);
+  }
+
+  private fill(crack: Crack, index: number): void {
+    const angle = FRONT_ANGLES[index] as Degrees;
+    this.solutions.stressIntensity.influence(crack, angle, this.at(index));
+  }
+
+  private at(index: number): Influence {
+    return this.front[index] as Influence;
   }
 }

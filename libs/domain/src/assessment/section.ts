@@ -2,7 +2,7 @@ import type { Crack } from '../geometry/crack';
 import { roomToUpperBounds, type Limit, type Room } from '../geometry/limit';
 import { OTHER_FACE, type CharacterisedFlaw } from './characterise';
 import { crackIn, type FlawCase } from './flaw-case';
-import { sectionEvaluator, type SectionEvaluator } from './section-evaluator';
+import { SectionEvaluator } from './section-evaluator';
 
 /** A flaw in its category, ready to be evaluated at any size. */
 export interface Section {
@@ -29,7 +29,7 @@ export function sectionOf(
 ): Section {
   const turned = face === flaw.situation.face ? flaw : turnedOver(flaw);
   const placed: FlawCase = { ...turned, situation: { ...turned.situation, kind, face } };
-  const evaluator = sectionEvaluator(placed);
+  const evaluator = new SectionEvaluator(placed);
   const { stressIntensity, referenceStress } = evaluator.solutions;
   const limits = [...stressIntensity.limits, ...referenceStress.limits];
   const { thickness } = placed.wall;

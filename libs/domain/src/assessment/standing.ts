@@ -28,7 +28,7 @@ export function standing(section: Section, { a, c }: CharacterisedFlaw): Standin
   const collapsed = point.lr >= evaluator.lrMax;
   return {
     ...point,
-    reserveOnLoad: reserveOnLoad(evaluator.margin, evaluator.lrMax / point.lr),
+    reserveOnLoad: reserveOnLoad((factor) => evaluator.margin(factor), evaluator.lrMax / point.lr),
     reserveOnToughness: collapsed ? null : leastReserve(states, line, flaw.toughness),
     front: states.map((state, i) => frontPoint(state, FRONT_ANGLES[i] ?? 0)),
     angle: FRONT_ANGLES[point.governing] ?? 0,

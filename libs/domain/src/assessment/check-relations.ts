@@ -1,0 +1,123 @@
+import type { AssessmentInput } from './assessment-input';
+import type { Refusal } from './assessment-outcome';
+import { number } from './number-text';
+
+type Rule = (input: AssessmentInput) => Refusal | null;
+
+/** What inputs say to each other: each is in its own range, together they are impossible. */
+export const checkRelations = (input: AssessmentInput): readonly Refusal[] =>
+  RULES.map((rule) => rule(input)).filter((refusal) => refusal !== null);
+
+const heightLeavesWall: Rule = ({ wall, flaw, sizing }) => {
+  const t = wall.thicknessMm.value;
+  const value = flaw.heightMm.value + sizing.heightAllowanceMm.value;
+  if (value < t) return null;
+  return {
+    input: 'flaw.heightMm',
+    limit: 'height with allowance below the wall thickness',
+    value,
+    message: `Height with allowance is ${number(value)} mm in a wall of ${number(t)} mm: nothing of the wall would be left.`,
+    instead:
+      'Check height and thickness; a flaw through the wall is a leak and is not accepted here.',
+  };
+};
+
+const ligamentFits: Rule = ({ wall, flaw }) => {
+  const value = flaw.kind === 'embedded' ? (flaw.ligamentMm?.value ?? 0) : 0;
+  const [t, height] = [wall.thicknessMm.value, flaw.heightMm.value];
+  if (value + height <= t || height >= t) return null;
+  return {
+    input: 'flaw.ligamentMm',
+    limit: 'ligament and height within the wall thickness',
+    value,
+    message: `Ligament ${number(value)} mm and height ${number(height)} mm do not fit into a wall of ${number(t)} mm.`,
+    instead: 'Check to which face the ligament was measured.',
+  };
+};
+
+const lengthNotBelowHeight: Rule = ({ flaw }) => {
+  const [height, value] = [flaw.heightMm.value, flaw.lengthMm.value];
+  // both mean a/c ≤ 2: a surface flaw's height is a, an embedded one's is 2a
+  const least = flaw.kind === 'surface' ? height : height / 2;
+  if (value >= least) return null;
+  return {
+    input: 'flaw.lengthMm',
+    limit: `length at least ${number(least)} mm (a/c at most 2)`,
+    value,
+    message: `A flaw ${number(value)} mm long and ${number(height)} mm high is steeper than the solutions hold for.`,
+    instead: 'Check that height and length are not swapped.',
+  };
+};
+
+const lengthInsideWidth: Rule = ({ wall, flaw }) => {
+  const width = wall.shape === 'plate' ? (wall.widthMm?.value ?? Infinity) : Infinity;
+  const value = flaw.lengthMm.value;
+  if (value < width) return null;
+  return {
+    input: 'flaw.lengthMm',
+    limit: 'length below the plate width',
+    value,
+    message: `Length ${number(value)} mm reaches the width of the plate, ${number(width)} mm.`,
+    instead: 'Check length and width; a flaw across the whole width needs another solution.',
+  };
+};
+
+const tensileAboveYield: Rule = ({ material }) => {
+  const [yields, value] = [material.yieldMPa.value, material.tensileMPa.value];
+  if (value >= yields) return null;
+  return {
+    input: 'material.tensileMPa',
+    limit: 'tensile strength not below yield strength',
+    value,
+    message: `Tensile strength ${number(value)} MPa is below the yield strength ${number(yields)} MPa.`,
+    instead: 'Check that the two are not swapped.',
+  };
+};
+
+const somePrimaryStress: Rule = ({ stress }) => {
+  const value = stress.primaryMembraneMPa.value + Math.abs(stress.primaryBendingMPa.value);
+  if (value > 0) return null;
+  return {
+    input: 'stress.primaryMembraneMPa',
+    limit: 'some primary stress above 0 MPa',
+    value,
+    message: 'There is no primary stress, so no reserve on load exists.',
+    instead: 'Give the stress of the governing load.',
+  };
+};
+
+const lawHasStages: Rule = ({ growth }) => {
+  const stages = growth.fatigue?.law.stages;
+  if (!stages || stages.length > 0) return null;
+  return {
+    input: 'growth.fatigue.law.stages',
+    limit: 'at least one stage',
+    value: 0,
+    message: 'The growth law has no stage.',
+    instead: 'Choose a law of the site’s library.',
+  };
+};
+
+const stagesMeet: Rule = ({ growth }) => {
+  const stages = growth.fatigue?.law.stages ?? [];
+  const at = stages.findIndex((stage, i) => i > 0 && stage.exponent === stages[i - 1]?.exponent);
+  if (at < 0) return null;
+  return {
+    input: `growth.fatigue.law.stages.${at}.exponent`,
+    limit: 'stages of different exponent',
+    value: stages[at]?.exponent ?? null,
+    message: 'Two stages of the growth law have the same exponent: they never meet.',
+    instead: 'Give them as one stage.',
+  };
+};
+
+const RULES: readonly Rule[] = [
+  heightLeavesWall,
+  ligamentFits,
+  lengthNotBelowHeight,
+  lengthInsideWidth,
+  tensileAboveYield,
+  somePrimaryStress,
+  lawHasStages,
+  stagesMeet,
+];
