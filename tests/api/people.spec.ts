@@ -137,7 +137,10 @@ describe('people of a site', () => {
     const at = async (instant: string) => {
       plant.clock.set(new Date(instant));
       const fresh = await plant.person('auditor', 'Fresh');
-      await plant.db.update(people).set({ accessUntil: '2026-12-02' }).where(eq(people.id, fresh.id));
+      await plant.db
+        .update(people)
+        .set({ accessUntil: '2026-12-02' })
+        .where(eq(people.id, fresh.id));
       return (await as(plant.app, fresh).get('/api/session')).status;
     };
     expect(await at('2026-12-02T23:59:59Z')).toBe(200);
@@ -180,24 +183,24 @@ describe('people of a site', () => {
     const ended = await admin().post(`/api/users/${person.id}/sessions/end`).send({});
     expect(ended.body).toEqual({ ended: 1 });
     expect((await as(plant.app, person).get('/api/session')).status).toBe(401);
-    expect(await lastEntry()).toMatchObject({ action: 'person.sessions-ended', entityId: person.id });
+    expect(await lastEntry()).toMatchObject({
+      action: 'person.sessions-ended',
+      entityId: person.id,
+    });
   });
 
   it('walks pages without losing or repeating anybody, in both orders', async () => {
-    for (const [sort, order] of [
-      ['name', 'asc'],
-      ['role', 'desc'],
-      ['certificateValidUntil', 'asc'],
-    ] as const) {
+    for (const sort of ['name', '-role', 'certificateValidUntil']) {
       const seen: string[] = [];
       let cursor: string | null = '';
       while (cursor !== null) {
-        const answer = await admin().get('/api/users').query({
-          sort,
-          order,
-          limit: 3,
-          ...(cursor ? { cursor } : {}),
-        });
+        const answer = await admin()
+          .get('/api/users')
+          .query({
+            sort,
+            limit: 3,
+            ...(cursor ? { cursor } : {}),
+          });
         seen.push(...(answer.body.rows as { id: string }[]).map((row) => row.id));
         cursor = answer.body.nextCursor as string | null;
       }
@@ -217,7 +220,9 @@ describe('people of a site', () => {
     const elsewhere = await addSite(plant.db, 'ELSE', 'Elsewhere Works');
     const stranger = await plant.person('administrator', 'A Stranger', elsewhere);
     expect((await admin().get(`/api/users/${stranger.id}`)).status).toBe(404);
-    expect((await admin().post(`/api/users/${stranger.id}/sessions/end`).send({})).status).toBe(404);
+    expect((await admin().post(`/api/users/${stranger.id}/sessions/end`).send({})).status).toBe(
+      404,
+    );
     const patched = await admin()
       .patch(`/api/users/${stranger.id}`)
       .set('If-Match', '"1"')

@@ -10,10 +10,15 @@ export type AccessState = (typeof ACCESS_STATES)[number];
 
 export const PEOPLE_SORTS = [
   'name',
+  '-name',
   'email',
+  '-email',
   'role',
+  '-role',
   'organisation',
+  '-organisation',
   'certificateValidUntil',
+  '-certificateValidUntil',
 ] as const;
 
 export const person = z.object({
@@ -74,7 +79,6 @@ export const listPeople = route({
     ...listQuery,
     role: z.enum(ROLES).optional(),
     sort: z.enum(PEOPLE_SORTS).default('name'),
-    order: z.enum(['asc', 'desc']).default('asc'),
   }),
   response: page(person),
 });

@@ -1,5 +1,7 @@
 import { randomUUID } from 'node:crypto';
 import { DEFAULT_SITE_RULES } from '@ligament/domain/contract/site-rules';
+import { GROWTH_LAWS } from '@ligament/domain/materials/growth-laws';
+import { growthLaws } from '@ligament/domain/schema/materials';
 import { siteRuleVersions, sites } from '@ligament/domain/schema/sites';
 import type { Transaction } from '../../db/database';
 import type { HistoryActor } from '../../http/actor';
@@ -14,7 +16,7 @@ export interface NewSite {
   readonly demo: boolean;
 }
 
-/** Opens a site with the rules a new site starts with; answers its identifier. */
+/** Opens a site with the rules and the library of growth laws a new site starts with; answers its identifier. */
 export async function openSite(
   tx: Transaction,
   now: Date,
@@ -35,6 +37,7 @@ export async function openSite(
     createdAt: now,
   };
   await tx.insert(siteRuleVersions).values(ruleVersion);
+  await tx.insert(growthLaws).values(libraryOf(id, now));
   const actor = { ...by, siteId: id };
   await writeHistory(tx, actor, now, {
     action: 'site.opened',
@@ -53,3 +56,16 @@ export async function openSite(
   });
   return id;
 }
+
+const libraryOf = (siteId: string, now: Date) =>
+  GROWTH_LAWS.map(({ key, title, environment, stages, thresholdMPaSqrtMm, source }) => ({
+    siteId,
+    key,
+    title,
+    environment,
+    stages,
+    thresholdMpaSqrtMm: thresholdMPaSqrtMm,
+    source,
+    createdAt: now,
+    updatedAt: now,
+  }));

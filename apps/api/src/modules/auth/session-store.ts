@@ -9,7 +9,8 @@ import type { Database } from '../../db/database';
 
 type SessionRow = typeof sessions.$inferSelect;
 type PersonRow = typeof people.$inferSelect;
-type SessionFacts = Omit<SessionRow, 'id' | 'userId'>;
+/** Lucia keeps a member `expiresAt` of its own; ours travels under another name. */
+type SessionFacts = Omit<SessionRow, 'id' | 'userId' | 'expiresAt'> & { readonly idleUntil: Date };
 type PersonFacts = Omit<PersonRow, 'id'>;
 
 declare module 'lucia' {
@@ -54,7 +55,7 @@ export function sessionStore(db: Database, clock: Clock) {
       const now = clock.now();
       await db.delete(sessions).where(and(eq(sessions.userId, personId), endedBy(now)));
       const { id } = await lucia.createSession(personId, {
-        expiresAt: new Date(now.getTime() + IDLE_MILLISECONDS),
+        idleUntil: new Date(now.getTime() + IDLE_MILLISECONDS),
         absoluteExpiresAt: new Date(now.getTime() + ABSOLUTE_MILLISECONDS),
         createdAt: now,
         lastSeenAt: now,
@@ -72,8 +73,9 @@ export function sessionStore(db: Database, clock: Clock) {
       const { session, user } = await lucia.validateSession(value);
       if (!session) return null;
       const now = clock.now().getTime();
-      const live = { session: { ...session, id: storedId(value) }, person: user };
-      if (now >= session.expiresAt.getTime() || now >= session.absoluteExpiresAt.getTime()) {
+      const { idleUntil: expiresAt, fresh: _fresh, ...facts } = session;
+      const live = { session: { ...facts, id: storedId(value), expiresAt }, person: user };
+      if (now >= expiresAt.getTime() || now >= session.absoluteExpiresAt.getTime()) {
         await this.end(live.session.id);
         return null;
       }
@@ -153,10 +155,15 @@ function hashedIds(adapter: Adapter): Adapter {
     async getSessionAndUser(id) {
       const [session, user] = await adapter.getSessionAndUser(storedId(id));
       if (!session || !user) return [null, null];
-      const attributes = { ...session.attributes, expiresAt: session.expiresAt };
+      const attributes = { ...session.attributes, idleUntil: session.expiresAt };
       return [{ ...session, id, attributes, expiresAt: new Date(Date.now() + 100 * HOUR) }, user];
     },
-    setSession: (session) => adapter.setSession({ ...session, id: storedId(session.id) }),
+    setSession: (session) =>
+      adapter.setSession({
+        ...session,
+        id: storedId(session.id),
+        expiresAt: session.attributes.idleUntil,
+      }),
     deleteSession: (id) => adapter.deleteSession(storedId(id)),
     updateSessionExpiration: (id, at) => adapter.updateSessionExpiration(storedId(id), at),
     getUserSessions: (userId) => adapter.getUserSessions(userId),

@@ -18,20 +18,25 @@ export interface PersonWithSessions {
 }
 
 /** Text every sort compares by; what is missing comes last. */
-const SORT_TEXT: Readonly<Record<ListQuery['sort'], SQL<string>>> = {
+const SORT_TEXT = {
   name: sql<string>`lower(${people.name})`,
   email: sql<string>`${people.email}`,
   role: sql<string>`${people.role}`,
   organisation: sql<string>`lower(${people.organisation})`,
   certificateValidUntil: sql<string>`coalesce(${people.certificateValidUntil}::text, '9999-12-31')`,
-};
+} satisfies Readonly<Record<string, SQL<string>>>;
+
+const isDownwards = (sort: ListQuery['sort']): boolean => sort.startsWith('-');
+
+const sortText = (sort: ListQuery['sort']): SQL<string> =>
+  SORT_TEXT[sort.replace('-', '') as keyof typeof SORT_TEXT];
 
 export const peopleRepository = (db: Database) => ({
   /** One more than the limit, to know whether a page follows. */
   async list(siteId: string, query: ListQuery, now: Date) {
-    const text = SORT_TEXT[query.sort];
+    const text = sortText(query.sort);
     const live = liveSessions(db, now);
-    const direction = query.order === 'asc' ? sql`asc` : sql`desc`;
+    const direction = isDownwards(query.sort) ? sql`desc` : sql`asc`;
     return db
       .select({
         person: people,
@@ -139,10 +144,10 @@ function matches({ search, role }: ListQuery): SQL | undefined {
   );
 }
 
-function after({ cursor, order }: ListQuery, text: SQL<string>): SQL | undefined {
+function after({ cursor, sort }: ListQuery, text: SQL<string>): SQL | undefined {
   if (cursor === undefined) return undefined;
   const [value, id] = decodeCursor(cursor, ['string', 'string']);
-  return order === 'asc'
-    ? sql`(${text}, ${people.id}::text) > (${value}, ${id})`
-    : sql`(${text}, ${people.id}::text) < (${value}, ${id})`;
+  return isDownwards(sort)
+    ? sql`(${text}, ${people.id}::text) < (${value}, ${id})`
+    : sql`(${text}, ${people.id}::text) > (${value}, ${id})`;
 }
