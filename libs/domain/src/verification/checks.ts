@@ -1,0 +1,26 @@
+import { CURVATURE_CHECKS } from './curvature-checks';
+import { evaluateRow, type CheckResult, type CheckRow } from './check-row';
+import { DIAGRAM_CHECKS } from './diagram-checks';
+import { END_TO_END_CHECKS } from './end-to-end-checks';
+import { GROWTH_CHECKS } from './growth-checks';
+import { LIMITING_SIZE_CHECKS } from './limiting-size-checks';
+import { PRESSURE_CHECKS } from './pressure-checks';
+import { REFERENCE_STRESS_CHECKS } from './reference-stress-checks';
+import { STRESS_INTENSITY_CHECKS } from './stress-intensity-checks';
+import { UNIT_CHECKS } from './unit-checks';
+
+/** Every value the engine is checked against, in the order of the computation. */
+export const CHECK_ROWS: readonly CheckRow[] = [
+  ...UNIT_CHECKS,
+  ...PRESSURE_CHECKS,
+  ...STRESS_INTENSITY_CHECKS,
+  ...CURVATURE_CHECKS,
+  ...REFERENCE_STRESS_CHECKS,
+  ...DIAGRAM_CHECKS,
+  ...GROWTH_CHECKS,
+  ...LIMITING_SIZE_CHECKS,
+  ...END_TO_END_CHECKS,
+];
+
+/** Computes every row here and now. */
+export const evaluateChecks = (): readonly CheckResult[] => CHECK_ROWS.map(evaluateRow);
