@@ -10,6 +10,8 @@ import { serveGrowthLaws } from './growth-laws/growth-laws.routes';
 import { serveMaterials } from './materials/materials.routes';
 import { serveSearch } from './search/search.routes';
 import { serveUnits } from './units/units.routes';
+import { serveAssessments } from './assessments/assessments.routes';
+import { serveFlaws } from './flaws/flaws.routes';
 
 /** Every module's routes, in one list. */
 export function serveModules(api: Api, deps: Deps): void {
@@ -23,4 +25,6 @@ export function serveModules(api: Api, deps: Deps): void {
   serveGrowthLaws(api, deps);
   serveComponents(api, deps);
   serveSearch(api, deps);
+  serveFlaws(api, deps);
+  serveAssessments(api, deps);
 }

@@ -1,6 +1,6 @@
 import type { ComponentView, LoadCaseView } from '@ligament/domain/contract/components';
 import type { MaterialView } from '@ligament/domain/contract/materials';
-import { urgencyOf } from '@ligament/domain/scheduling/urgency-of';
+import { urgencyOf } from '@ligament/domain/scheduling/urgency';
 import type { loadCases } from '@ligament/domain/schema/components';
 import type { Clock } from '../../clock';
 import type { Database } from '../../db/database';

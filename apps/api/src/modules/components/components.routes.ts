@@ -6,7 +6,7 @@ import {
   readComponent,
   type ComponentRow,
 } from '@ligament/domain/contract/components';
-import { urgencyOf } from '@ligament/domain/scheduling/urgency-of';
+import { urgencyOf } from '@ligament/domain/scheduling/urgency';
 import type { Deps } from '../../deps';
 import { cutPage } from '../../http/cursor';
 import { answerCsv } from '../../http/csv-answer';

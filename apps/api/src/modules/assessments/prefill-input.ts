@@ -1,0 +1,144 @@
+import type {
+  AssessmentInput,
+  FlawInput,
+  MaterialInput,
+  SizingInput,
+  StressInput,
+  WallInput,
+} from '@ligament/domain/assessment/assessment-input';
+import type { SiteRules } from '@ligament/domain/contract/site-rules';
+import type { SizeQualifier } from '@ligament/domain/contract/vocabulary';
+import type { Origins } from '@ligament/domain/schema/materials';
+import type { Given } from '@ligament/domain/units/provenance';
+import type { AssessmentBasis } from './assessment-basis.repository';
+import { prefillGrowth } from './prefill-growth';
+import { prefillResidual } from './prefill-residual';
+
+/** Growth is followed this far; a longer life is never shown as a figure. */
+const HORIZON_YEARS = 40;
+
+/** The inputs an assessment starts with: from register, finding and site lists, each saying where it comes from. */
+export function prefillInput(
+  basis: AssessmentBasis,
+  rules: SiteRules,
+  rulesNumber: number,
+): AssessmentInput {
+  return {
+    wall: wallOf(basis),
+    flaw: flawOf(basis),
+    sizing: sizingOf(basis, rules, rulesNumber),
+    stress: stressOf(basis),
+    material: materialOf(basis),
+    growth: prefillGrowth(basis),
+    horizonYears: HORIZON_YEARS,
+  };
+}
+
+function wallOf({ component, finding }: AssessmentBasis): WallInput {
+  const nominal = `Nominal wall, drawing ${component.drawingNo || 'not named'}`;
+  const thicknessMm: Given =
+    finding.wallMm === null
+      ? { value: component.wallMm, provenance: 'certificate', note: nominal }
+      : { value: finding.wallMm, provenance: 'measured', note: 'Wall measured at the indication' };
+  if (component.kind === 'sphere' || component.kind === 'head')
+    return { shape: 'plate', thicknessMm, widthMm: null };
+  return {
+    shape: 'cylinder',
+    thicknessMm,
+    insideDiameterMm: {
+      value: component.insideDiameterMm,
+      provenance: 'certificate',
+      note: `Drawing ${component.drawingNo || 'not named'}`,
+    },
+  };
+}
+
+function flawOf({ finding, inspection }: AssessmentBasis): FlawInput {
+  const report = `Report ${inspection.reportNo}, ${inspection.technique}`;
+  const measured = (value: number, qualifier: SizeQualifier): Given => ({
+    value,
+    provenance: 'measured',
+    note:
+      qualifier === '='
+        ? report
+        : `${report}; reported as ${qualifier} ${value} mm, the bound is used`,
+  });
+  return {
+    kind: finding.kind,
+    face: finding.face,
+    orientation: finding.orientation,
+    heightMm: measured(finding.heightMm, finding.heightQualifier),
+    lengthMm: measured(finding.lengthMm, finding.lengthQualifier),
+    ligamentMm: finding.kind === 'embedded' ? measured(finding.ligamentMm ?? 0, '=') : null,
+  };
+}
+
+function sizingOf(
+  { inspection }: AssessmentBasis,
+  rules: SiteRules,
+  rulesNumber: number,
+): SizingInput {
+  const note = `Site rules version ${rulesNumber}, ${inspection.technique}`;
+  return {
+    heightAllowanceMm: {
+      value: rules.heightAllowanceMmByTechnique[inspection.technique],
+      provenance: 'standard default',
+      note,
+    },
+    lengthAllowanceMm: {
+      value: rules.lengthAllowanceMmByTechnique[inspection.technique],
+      provenance: 'standard default',
+      note,
+    },
+  };
+}
+
+function stressOf(basis: AssessmentBasis): StressInput {
+  const { finding, loadCase } = basis;
+  const hoop = finding.orientation === 'axial';
+  const membrane = hoop ? 'hoopMembraneMpa' : 'axialMembraneMpa';
+  const bending = hoop ? 'hoopBendingMpa' : 'axialBendingMpa';
+  const opensToBore = finding.kind === 'surface' && finding.face === 'inside';
+  return {
+    primaryMembraneMPa: fromOrigins(
+      loadCase[membrane],
+      loadCase.origins,
+      membrane,
+      `Load case ${loadCase.name}`,
+    ),
+    primaryBendingMPa: fromOrigins(
+      loadCase[bending],
+      loadCase.origins,
+      bending,
+      `Load case ${loadCase.name}`,
+    ),
+    residual: prefillResidual(basis),
+    crackFacePressureMPa: opensToBore
+      ? {
+          value: Math.max(0, loadCase.pressureMpa),
+          provenance: 'standard default',
+          note: `Pressure of load case ${loadCase.name} reaches the crack faces`,
+        }
+      : null,
+  };
+}
+
+function materialOf({ material }: AssessmentBasis): MaterialInput {
+  const from = (value: number, property: string) =>
+    fromOrigins(value, material.origins, property, material.name);
+  return {
+    yieldMPa: from(material.yieldMpa, 'yieldMpa'),
+    tensileMPa: from(material.tensileMpa, 'tensileMpa'),
+    youngsModulusMPa: from(material.youngsModulusMpa, 'youngsModulusMpa'),
+    poissonsRatio: from(material.poissonsRatio, 'poissonsRatio'),
+    toughnessMPaSqrtM: from(material.toughnessMpaSqrtM, 'toughnessMpaSqrtM'),
+    yieldPlateau: material.yieldPlateau,
+  };
+}
+
+function fromOrigins(value: number, origins: Origins, property: string, what: string): Given {
+  const origin = origins[property];
+  return origin
+    ? { value, provenance: origin.provenance, note: origin.note ? `${what}: ${origin.note}` : what }
+    : { value, provenance: 'assumed', note: `${what}: no origin recorded` };
+}

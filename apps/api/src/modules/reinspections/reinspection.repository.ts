@@ -1,0 +1,54 @@
+import { reinspections, reminders } from '@ligament/domain/schema/schedule';
+import { and, eq, inArray, isNull, notInArray, or, sql } from 'drizzle-orm';
+import type { Database } from '../../db/database';
+
+export type ReinspectionRecord = typeof reinspections.$inferSelect;
+
+const stillOpen = notInArray(reinspections.state, ['done', 'cancelled']);
+
+export const reinspectionRepository = (db: Database) => ({
+  async add(values: typeof reinspections.$inferInsert): Promise<ReinspectionRecord | undefined> {
+    const [row] = await db.insert(reinspections).values(values).returning();
+    return row;
+  },
+
+  async openOfFlaw(flawId: string): Promise<ReinspectionRecord | undefined> {
+    const [row] = await db
+      .select()
+      .from(reinspections)
+      .where(and(eq(reinspections.flawId, flawId), stillOpen));
+    return row;
+  },
+
+  /** Open tasks of some flaws, and those of the component that are about no flaw. */
+  openOfComponent(componentId: string, flawIds: readonly string[]): Promise<ReinspectionRecord[]> {
+    const about =
+      flawIds.length > 0
+        ? or(isNull(reinspections.flawId), inArray(reinspections.flawId, [...flawIds]))
+        : isNull(reinspections.flawId);
+    return db
+      .select()
+      .from(reinspections)
+      .where(and(eq(reinspections.componentId, componentId), about, stillOpen));
+  },
+
+  async setState(
+    id: string,
+    state: ReinspectionRecord['state'],
+    now: Date,
+    doneInspectionId: string | null = null,
+  ): Promise<void> {
+    await db
+      .update(reinspections)
+      .set({ state, doneInspectionId, updatedAt: now, version: sql`${reinspections.version} + 1` })
+      .where(eq(reinspections.id, id));
+  },
+
+  /** Reminders not yet sent say nothing true any more. */
+  async cancelQueuedReminders(id: string): Promise<void> {
+    await db
+      .update(reminders)
+      .set({ state: 'cancelled' })
+      .where(and(eq(reminders.reinspectionId, id), eq(reminders.state, 'queued')));
+  },
+});
