@@ -42,3 +42,10 @@ export const NAVIGATION: readonly NavigationGroup[] = [
     ],
   },
 ];
+
+const NEAREST_PATHS = ['/today', '/inspections', '/flaws', '/schedule'];
+
+/** What inspectors and planners open in the field. */
+export const NEAREST: readonly NavigationEntry[] = NAVIGATION.flatMap(
+  (group) => group.entries,
+).filter((entry) => NEAREST_PATHS.includes(entry.path));

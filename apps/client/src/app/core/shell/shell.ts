@@ -7,7 +7,7 @@ import { ErrorReporter } from '../errors/error-reporter';
 import { Session } from '../session/session';
 import { FocusOnNavigation } from './focus-on-navigation';
 import { Mark } from './mark';
-import { NAVIGATION } from './navigation';
+import { NAVIGATION, NEAREST } from './navigation';
 import { SearchBox } from './search-box';
 import { THEMES, ThemeChoice } from './theme';
 
@@ -42,6 +42,11 @@ export class Shell {
         (entry) => this.session.user() && this.session.can(entry.action),
       ),
     })).filter((group) => group.entries.length > 0),
+  );
+
+  /** On a phone these stay within reach of the thumb. */
+  protected readonly nearest = computed(() =>
+    NEAREST.filter((entry) => this.session.user() && this.session.can(entry.action)),
   );
 
   protected readonly initials = computed(() =>

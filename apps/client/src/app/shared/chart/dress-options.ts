@@ -1,4 +1,6 @@
 import type { EChartsCoreOption } from 'echarts/core';
+import { cellText } from '../drawing/twin-table';
+import type { Cell } from '../table/csv-text';
 
 type Part = Readonly<Record<string, unknown>>;
 
@@ -35,6 +37,7 @@ export function dressOptions(options: EChartsCoreOption): EChartsCoreOption {
       borderColor: 'var(--rule-strong)',
       borderWidth: 1,
       shadowBlur: 0,
+      valueFormatter: (value: unknown) => cellText(value as Cell, 3),
       ...part(own['tooltip']),
       textStyle: { color: 'var(--ink)', fontSize: 12, ...part(part(own['tooltip'])['textStyle']) },
     },

@@ -19,7 +19,13 @@ export interface Figure {
         <div>
           <dt>{{ figure.label }}</dt>
           <dd [class]="figure.tone ?? ''">
-            <strong>{{ figure.value }}</strong> <span>{{ figure.beside }} {{ figure.unit }}</span>
+            <strong>{{ figure.value }}</strong>
+            @if (figure.beside; as beside) {
+              <span> {{ beside }}</span>
+            }
+            @if (figure.unit; as unit) {
+              <span> {{ unit }}</span>
+            }
           </dd>
         </div>
       }
@@ -34,14 +40,15 @@ export interface Figure {
       display: grid;
       grid-template-columns: repeat(auto-fit, minmax(150px, 1fr));
       margin: 0;
-      background: var(--rule);
+      background: var(--sheet);
       border: 1px solid var(--rule);
       border-radius: var(--radius);
       gap: 1px;
+      overflow: hidden;
     }
     div {
       padding: 10px 16px;
-      background: var(--sheet);
+      outline: 1px solid var(--rule);
     }
     dt {
       color: var(--ink-2);
@@ -55,8 +62,10 @@ export interface Figure {
       font-weight: 600;
     }
     dd span {
+      margin-left: 1px;
       color: var(--ink-2);
       font-size: 12px;
+      white-space: nowrap;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

@@ -43,6 +43,10 @@ export interface Crumb {
     }
     nav a {
       color: inherit;
+      text-decoration: none;
+    }
+    nav a:hover {
+      text-decoration: underline;
     }
     .row {
       display: flex;

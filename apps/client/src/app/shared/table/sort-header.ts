@@ -16,9 +16,13 @@ import { ChangeDetectionStrategy, Component, computed, input, output } from '@an
       font: inherit;
       cursor: pointer;
     }
+    button:hover {
+      color: var(--ink);
+      text-decoration: underline;
+    }
     span {
-      display: inline-block;
-      width: 10px;
+      position: absolute;
+      margin-left: 3px;
     }
   `,
   host: { '[attr.aria-sort]': 'direction()' },
