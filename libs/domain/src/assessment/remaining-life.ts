@@ -2,7 +2,8 @@ import type { GrowthHistory } from './follow-growth';
 import type { RemainingLife } from './assessment-outcome';
 
 // rounded down so that no figure promises more than was computed
-const down = (years: number) => Math.floor(years * 100) / 100;
+// (a rounding of the machine is not a reason to lose a hundredth)
+const down = (years: number) => Math.floor(years * 100 + 1e-6) / 100;
 
 /** Longest life ever stated as a figure [years]; common practice. */
 const LONGEST_STATED = 40;

@@ -67,7 +67,11 @@ export function integrateGrowth(
       h = Math.max(h * shrink(error), SMALLEST_STEP);
       continue;
     }
-    if (!Number.isFinite(stepper.next[0] as number)) return done('no growth');
+    if (!Number.isFinite(stepper.next[0] as number)) {
+      // nothing grows any more: the flaw stands as it is to the horizon
+      states.push({ ...sizeIn(y), years: horizonYears });
+      return done('no growth');
+    }
     const event = firstEvent(stepper, y, h, events);
     if (event) stepper.step(y, event.h);
     distance += event ? event.h : h;
