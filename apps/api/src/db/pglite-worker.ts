@@ -1,12 +1,14 @@
 // Runs PGlite in a thread of its own, so that a long statement never freezes the server.
 import { parentPort, workerData } from 'node:worker_threads';
 import { PGlite, types } from '@electric-sql/pglite';
+import { isAllowed } from './statement-kind';
 import {
   APPLICATION_ROLE,
   type QueryResult,
   type WorkerAnswer,
   type WorkerHello,
   type WorkerRequest,
+  type WorkerStart,
 } from './worker-messages';
 
 const asText = (value: string) => value;
@@ -25,25 +27,30 @@ const parsers = Object.fromEntries(
   ].map((type) => [type, asText]),
 );
 
-/** Ways back to superuser rights, and the one statement that hangs the engine for ever. */
-const FORBIDDEN =
-  /\b(re)?set\s+(local\s+|session\s+)*(role|session\s+authorization)\b|\breset\s+all\b|\bdiscard\s+all\b|\bcopy\b[\s\S]*\bprogram\b/i;
+const NOTHING: QueryResult = { rows: [], fields: [] };
 
 const port = parentPort;
 if (!port) throw new Error('pglite-worker runs only as a worker thread');
 
-const { folder } = workerData as { readonly folder: string };
-const opening = PGlite.create(`file://${folder}`);
+const { folder, asApplication } = workerData as WorkerStart;
+let restricted = false;
+const opening = open();
 
 opening.then(
   () => port.postMessage({ ready: true } satisfies WorkerHello),
   (error: unknown) =>
-    port.postMessage({ ready: false, reason: String(error) } satisfies WorkerHello),
+    port.postMessage({ ready: false, reason: describe(error).message } satisfies WorkerHello),
 );
 
 port.on('message', (request: WorkerRequest) => {
   void answer(request).then((reply) => port.postMessage(reply));
 });
+
+async function open(): Promise<PGlite> {
+  const database = await PGlite.create(folder === null ? 'memory://' : `file://${folder}`);
+  if (asApplication) await actAsApplication(database);
+  return database;
+}
 
 async function answer(request: WorkerRequest): Promise<WorkerAnswer> {
   try {
@@ -56,32 +63,52 @@ async function answer(request: WorkerRequest): Promise<WorkerAnswer> {
 async function perform(database: PGlite, request: WorkerRequest): Promise<QueryResult> {
   switch (request.kind) {
     case 'query': {
-      if (FORBIDDEN.test(request.sql)) throw new Error('This statement is not allowed.');
+      if (restricted && !isAllowed(request.sql)) throw new Error('This statement is not allowed.');
+      const options = { rowMode: request.rowMode, parsers };
       const { rows, affectedRows, fields } = await database.query(
         request.sql,
         [...request.params],
-        {
-          rowMode: request.rowMode,
-          parsers,
-        },
+        options,
       );
       return { rows, affectedRows, fields };
     }
     case 'maintain':
-      await database.exec(`reset role; ${request.sql}`);
-      await database.exec(`set role ${APPLICATION_ROLE}`);
-      return { rows: [], fields: [] };
+      await maintain(database, request.statements);
+      return NOTHING;
     case 'act as application':
-      await database.exec(`set role ${APPLICATION_ROLE}`);
-      return { rows: [], fields: [] };
+      await actAsApplication(database);
+      return NOTHING;
     case 'close':
-      await database.exec('reset role; checkpoint');
+      await database.exec('reset role');
+      await database.exec('checkpoint');
       await database.close();
-      return { rows: [], fields: [] };
+      return NOTHING;
   }
 }
 
-function describe(error: unknown): Readonly<Record<string, unknown>> {
+async function actAsApplication(database: PGlite): Promise<void> {
+  const setter = 'pg_catalog.set_config(text, text, boolean)';
+  const { rows } = await database.query<{ open: boolean }>(
+    `select has_function_privilege('public', '${setter}', 'execute') as open`,
+  );
+  // with it any statement could take the superuser's role back
+  if (rows[0]?.open) await database.exec(`revoke execute on function ${setter} from public`);
+  await database.exec(`set role ${APPLICATION_ROLE}`);
+  restricted = true;
+}
+
+async function maintain(database: PGlite, statements: readonly string[]): Promise<void> {
+  try {
+    await database.exec('reset role');
+    for (const statement of statements) await database.exec(statement);
+  } finally {
+    if (restricted) await database.exec(`set role ${APPLICATION_ROLE}`);
+  }
+}
+
+function describe(
+  error: unknown,
+): Readonly<Record<string, unknown>> & { readonly message: string } {
   if (!(error instanceof Error)) return { message: String(error) };
   const { code, constraint, detail, table, column, severity } = error as Error &
     Record<string, unknown>;

@@ -1,71 +1,70 @@
 import { AsyncLocalStorage } from 'node:async_hooks';
-import { Worker } from 'node:worker_threads';
 import type { Logger } from 'pino';
-import { DatabaseFailure, DatabaseUnavailable } from './database-failures';
-import { Turns } from './turns';
-import type { QueryResult, WorkerAnswer, WorkerHello, WorkerRequest } from './worker-messages';
+import { BoundTransaction, type QueryClient } from './bound-transaction';
+import { DatabaseUnavailable } from './database-failures';
+import { mayWrite } from './statement-kind';
+import { type TurnKind, Turns } from './turns';
+import { WorkerConnection } from './worker-connection';
+import type { DatabaseRequest, QueryResult } from './worker-messages';
 
-interface QueryOptions {
-  readonly rowMode?: 'array' | 'object';
-}
-
-/** What a query builder needs of a connection. */
-export interface QueryClient {
-  query(sql: string, params?: readonly unknown[], options?: QueryOptions): Promise<QueryResult>;
-}
-
-interface Pending {
-  readonly resolve: (result: QueryResult) => void;
-  readonly reject: (error: Error) => void;
-  readonly timer: NodeJS.Timeout;
+export interface Supervision {
+  /** Longest time one statement may take [ms]. */
+  readonly deadlineMs?: number;
+  /** Longest time the database may take to open, recovery included [ms]. */
+  readonly openDeadlineMs?: number;
+  /** Longest time a transaction may hold the connection between two statements [ms]. */
+  readonly idleDeadlineMs?: number;
+  /** Asked before a statement that writes; throws when the disk is nearly full. */
+  readonly beforeWrite?: () => void;
 }
 
 const MINUTE = 60_000;
+/** Restarts within a minute from which the database counts as unhealthy. */
+const TOO_MANY = 3;
 
 /**
  * PGlite in a supervised worker thread: one statement at a time, a transaction alone, a deadline for each statement.
  * A worker that overruns or dies is ended and opened again; what was waiting on it fails with DatabaseUnavailable.
  */
 export class SupervisedPglite implements QueryClient {
-  private worker: Worker | undefined;
-  private opening: Promise<void> | undefined;
-  private readonly pending = new Map<number, Pending>();
+  private connection: Promise<WorkerConnection> | undefined;
   private readonly turns = new Turns();
-  private readonly inTransaction = new AsyncLocalStorage<true>();
+  private readonly inTransaction = new AsyncLocalStorage<BoundTransaction>();
   private readonly restarts: number[] = [];
-  private nextId = 1;
+  private readonly supervision: Required<Supervision>;
   private application = false;
-  private closed = false;
-  /** Longest time one statement may take [ms]. */
+  private closing = false;
+  private closed: Promise<void> | undefined;
+  private written = false;
   deadlineMs: number;
 
   constructor(
-    private readonly folder: string,
+    /** Where the database lies; null keeps it in memory, empty again after a restart. */
+    private readonly folder: string | null,
     private readonly log: Logger,
-    deadlineMs = 5000,
-    /** Asked before a statement that writes; throws when the disk is nearly full. */
-    private readonly beforeWrite: () => void = () => undefined,
+    supervision: Supervision = {},
   ) {
-    this.deadlineMs = deadlineMs;
+    this.supervision = {
+      deadlineMs: supervision.deadlineMs ?? 5000,
+      openDeadlineMs: supervision.openDeadlineMs ?? MINUTE,
+      idleDeadlineMs: supervision.idleDeadlineMs ?? MINUTE / 2,
+      beforeWrite: supervision.beforeWrite ?? (() => undefined),
+    };
+    this.deadlineMs = this.supervision.deadlineMs;
   }
 
   /** Whether the worker has been steady: fewer than three restarts in the last minute. */
   healthy(): boolean {
     const since = Date.now() - MINUTE;
-    return !this.closed && this.restarts.filter((time) => time > since).length < 3;
+    return !this.closing && this.restarts.filter((time) => time > since).length < TOO_MANY;
   }
 
+  /** Opens the database, or throws DatabaseFailure saying why it does not open. */
   async open(): Promise<void> {
-    this.opening ??= this.startWorker();
-    try {
-      await this.opening;
-    } catch (error) {
-      this.opening = undefined;
-      throw error;
-    }
+    await this.connect();
   }
 
-  /** From here on every statement runs without superuser rights. */
+  /** From here on every statement runs without superuser rights, also after a restart. */
   async actAsApplication(): Promise<void> {
     this.application = true;
     await this.turns.take(() => this.send({ kind: 'act as application' }));
@@ -74,135 +73,135 @@ export class SupervisedPglite implements QueryClient {
   async query(
     sql: string,
     params: readonly unknown[] = [],
-    options: QueryOptions = {},
+    options: { readonly rowMode?: 'array' | 'object' } = {},
   ): Promise<QueryResult> {
-    if (this.inTransaction.getStore()) {
-      throw new Error(
-        'Inside a transaction only the transaction may be used; this statement would wait for ever.',
-      );
-    }
-    if (/^\s*(insert|update|delete)\b/i.test(sql)) this.beforeWrite();
-    return this.turns.take(() => this.statement(sql, params, options));
+    this.refuseInsideTransaction();
+    return this.turns.take(async () => this.on(await this.reached()).query(sql, params, options));
   }
 
   async transaction<T>(work: (client: QueryClient) => Promise<T>): Promise<T> {
-    if (this.inTransaction.getStore())
-      throw new Error('Transactions are not nested; pass the one you have.');
-    this.beforeWrite();
+    this.refuseInsideTransaction();
     return this.turns.take(async () => {
-      await this.statement('begin');
-      const worker = this.worker;
-      // a statement of this transaction must not run, alone, on a worker opened after the first one died
-      const client: QueryClient = {
-        query: (sql, params, options) => {
-          if (this.worker !== worker) throw new DatabaseUnavailable('The transaction was lost.');
-          return this.statement(sql, params, options);
-        },
-      };
+      // bound to one worker: nothing of it may run, alone, on a worker opened after that one died
+      const connection = await this.reached();
+      const client = this.on(connection);
+      const bound = new BoundTransaction(client, this.supervision.idleDeadlineMs);
+      await client.query('begin');
       try {
-        const result = await this.inTransaction.run(true, () => work(client));
+        const result = await this.inTransaction.run(bound, () => bound.run(work));
         await client.query('commit');
         return result;
       } catch (error) {
-        if (this.worker === worker) await this.statement('rollback').catch(() => undefined);
+        if (connection.alive) await client.query('rollback').catch(() => undefined);
         throw error;
       }
     });
   }
 
-  /** Runs statements that need full rights (checkpoint, analyze, vacuum); they have a minute. */
-  async maintain(sql: string): Promise<void> {
-    await this.turns.take(() => this.send({ kind: 'maintain', sql }, MINUTE));
+  /** Runs upkeep that needs full rights (checkpoint, analyze, vacuum) when nobody waits; each has two minutes. */
+  async maintain(...statements: readonly string[]): Promise<void> {
+    await this.exclusively(() => Promise.resolve(), statements);
   }
 
-  async close(): Promise<void> {
-    if (this.closed) return;
-    await this.turns.take(() => this.send({ kind: 'close' }, MINUTE));
-    this.closed = true;
-    await this.worker?.terminate();
+  /** Tells whether anything was written since it was last asked. */
+  takeWritten(): boolean {
+    const written = this.written;
+    this.written = false;
+    return written;
   }
 
-  private statement(sql: string, params: readonly unknown[] = [], options: QueryOptions = {}) {
-    return this.send({ kind: 'query', sql, params, rowMode: options.rowMode ?? 'object' });
+  /** Runs upkeep and then `work` while no statement runs, for instance to copy the folder. */
+  async exclusively<T>(
+    work: () => Promise<T>,
+    statements: readonly string[] = ['checkpoint'],
+    kind: TurnKind = 'batch',
+  ): Promise<T> {
+    return this.turns.take(async () => {
+      await this.send({ kind: 'maintain', statements }, 2 * MINUTE);
+      return work();
+    }, kind);
   }
 
-  private async send(request: Unnumbered, deadlineMs = this.deadlineMs): Promise<QueryResult> {
-    if (this.closed) throw new DatabaseUnavailable('The database is closed.');
-    await this.open();
-    const id = this.nextId++;
-    return new Promise<QueryResult>((resolve, reject) => {
-      const timer = setTimeout(() => this.giveUp(`no answer within ${deadlineMs} ms`), deadlineMs);
-      this.pending.set(id, { resolve, reject, timer });
-      this.worker?.postMessage({ ...request, id } as WorkerRequest);
+  /** Lets what is under way end, writes a checkpoint and ends the worker; never throws. */
+  close(): Promise<void> {
+    this.closed ??= this.turns.take(async () => {
+      this.closing = true;
+      const connection = await this.connection?.catch(() => undefined);
+      if (!connection) return;
+      await connection
+        .send({ kind: 'close' }, MINUTE)
+        .catch((error: unknown) => this.log.error({ err: error }, 'database not closed cleanly'));
+      await connection.end('closed');
     });
+    return this.closed;
   }
 
-  private async startWorker(): Promise<void> {
-    const worker = new Worker(workerFile(), { workerData: { folder: this.folder } });
-    await new Promise<void>((resolve, reject) => {
-      worker.once('error', (error) =>
-        reject(new DatabaseFailure(`the database did not open (${error.message}).`)),
+  private refuseInsideTransaction(): void {
+    if (this.inTransaction.getStore()?.isOpen) {
+      throw new Error(
+        'Inside a transaction only the transaction may be used; this statement would wait for ever.',
       );
-      worker.once('message', (hello: WorkerHello) => {
-        if (hello.ready) resolve();
-        else
-          reject(
-            new DatabaseFailure(`the database in ${this.folder} did not open (${hello.reason}).`),
-          );
-      });
-    });
-    worker.removeAllListeners('error');
-    worker.on('message', (answer: WorkerAnswer) => this.settle(answer));
-    worker.on('error', (error) => this.giveUp(error.message, worker));
-    worker.on('exit', () => this.giveUp('the worker ended', worker));
-    this.worker = worker;
-    if (this.application) {
-      const id = this.nextId++;
-      this.pending.set(id, {
-        resolve: () => undefined,
-        reject: () => undefined,
-        timer: setTimeout(() => undefined, 0),
-      });
-      worker.postMessage({ id, kind: 'act as application' } satisfies WorkerRequest);
     }
   }
 
-  private settle(answer: WorkerAnswer): void {
-    const waiting = this.pending.get(answer.id);
-    if (!waiting) return;
-    this.pending.delete(answer.id);
-    clearTimeout(waiting.timer);
-    if ('result' in answer) waiting.resolve(answer.result);
-    else waiting.reject(Object.assign(new Error(String(answer.error['message'])), answer.error));
+  /** Statements sent to one worker, whatever becomes of it. */
+  private on(connection: WorkerConnection): QueryClient {
+    return {
+      query: async (sql, params = [], { rowMode = 'object' } = {}) => {
+        if (mayWrite(sql)) {
+          this.supervision.beforeWrite();
+          this.written = true;
+        }
+        return connection.send({ kind: 'query', sql, params, rowMode }, this.deadlineMs);
+      },
+    };
   }
 
-  /** Ends the worker and fails everything that waits on it; the next statement opens a new one. */
-  private giveUp(why: string, worker = this.worker): void {
-    if (this.closed || !worker || worker !== this.worker) return;
+  private async send(request: DatabaseRequest, deadlineMs = this.deadlineMs) {
+    const connection = await this.reached();
+    return connection.send(request, deadlineMs);
+  }
+
+  /** The connection for a statement: what a request meets while the database is away is always DatabaseUnavailable. */
+  private async reached(): Promise<WorkerConnection> {
+    if (this.closing) throw new DatabaseUnavailable('The database is closed.');
+    try {
+      return await this.connect();
+    } catch (error) {
+      throw new DatabaseUnavailable('The database could not be opened again.', { cause: error });
+    }
+  }
+
+  private connect(): Promise<WorkerConnection> {
+    this.connection ??= this.openConnection();
+    return this.connection;
+  }
+
+  private async openConnection(): Promise<WorkerConnection> {
+    try {
+      return await WorkerConnection.open(
+        { folder: this.folder, asApplication: this.application },
+        this.supervision.openDeadlineMs,
+        (why) => this.restart(why),
+      );
+    } catch (error) {
+      this.restarts.push(Date.now());
+      this.connection = undefined;
+      throw error;
+    }
+  }
+
+  private restart(why: string): void {
+    if (this.closing) return;
     this.log.error({ why }, 'database worker restarted');
     this.restarts.push(Date.now());
-    this.worker = undefined;
-    this.opening = worker.terminate().then(() => this.startWorker());
-    this.opening.catch(() => (this.opening = undefined));
-    for (const { reject, timer } of this.pending.values()) {
-      clearTimeout(timer);
-      reject(new DatabaseUnavailable(`The database was restarted: ${why}.`));
-    }
-    this.pending.clear();
+    const ended = this.connection;
+    // the old thread must be gone before its folder is opened again
+    this.connection = (ended ?? Promise.resolve(undefined))
+      .then((connection) => connection?.end(why))
+      .then(() => this.openConnection());
+    this.connection.catch((error: unknown) =>
+      this.log.error({ err: error }, 'the database did not open again'),
+    );
   }
-}
-
-type Unnumbered = WorkerRequest extends infer R
-  ? R extends WorkerRequest
-    ? Omit<R, 'id'>
-    : never
-  : never;
-
-/** The worker as bundled beside this file, or through tsx when running from source. */
-function workerFile(): URL {
-  const fromSource = import.meta.url.endsWith('.ts');
-  return new URL(
-    fromSource ? './pglite-worker-from-source.mjs' : './pglite-worker.js',
-    import.meta.url,
-  );
 }

@@ -1,15 +1,26 @@
-/** What the main thread asks of the database worker. */
-export type WorkerRequest =
+type Request =
   | {
-      readonly id: number;
       readonly kind: 'query';
       readonly sql: string;
       readonly params: readonly unknown[];
       readonly rowMode: 'array' | 'object';
     }
-  | { readonly id: number; readonly kind: 'maintain'; readonly sql: string }
-  | { readonly id: number; readonly kind: 'act as application' }
-  | { readonly id: number; readonly kind: 'close' };
+  /** Upkeep with full rights; statements separated, since a vacuum must stand alone. */
+  | { readonly kind: 'maintain'; readonly statements: readonly string[] }
+  | { readonly kind: 'act as application' }
+  | { readonly kind: 'close' };
+
+/** What the main thread asks of the database worker. */
+export type DatabaseRequest = Request;
+export type WorkerRequest = Request & { readonly id: number };
+
+/** What a worker is started with. */
+export interface WorkerStart {
+  /** Where the database lies; null keeps it in memory. */
+  readonly folder: string | null;
+  /** Give up superuser rights before the first statement. */
+  readonly asApplication: boolean;
+}
 
 export interface QueryResult {
   readonly rows: unknown[];
