@@ -4,6 +4,9 @@ import { signedInGuard } from './core/session/signed-in-guard';
 /** Pages behind the sign-in, one lazy feature a line. */
 const pages: Routes = [
   { path: '', pathMatch: 'full', redirectTo: 'today' },
+  { path: 'history', loadChildren: () => import('./features/history/history.routes') },
+  { path: 'people', loadChildren: () => import('./features/people/people.routes') },
+  { path: 'site-rules', loadChildren: () => import('./features/site-rules/site-rules.routes') },
   { path: 'account', loadChildren: () => import('./features/account/account.routes') },
   {
     path: 'not-allowed',

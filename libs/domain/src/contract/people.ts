@@ -47,7 +47,8 @@ export type Person = z.infer<typeof person>;
 
 const personId = z.object({ id });
 
-const facts = {
+/** What an administrator records of a person, each with its check. */
+export const personFacts = {
   name: line(120),
   role: z.enum(ROLES, { error: 'Choose a role.' }),
   organisation: optionalLine(120),
@@ -58,16 +59,16 @@ const facts = {
 };
 
 export const invitation = z.strictObject({
-  ...facts,
+  ...personFacts,
   email,
-  organisation: facts.organisation.default(''),
-  competence: facts.competence.default(''),
-  certificateNo: facts.certificateNo.default(''),
-  certificateValidUntil: facts.certificateValidUntil.default(null),
-  accessUntil: facts.accessUntil.default(null),
+  organisation: personFacts.organisation.default(''),
+  competence: personFacts.competence.default(''),
+  certificateNo: personFacts.certificateNo.default(''),
+  certificateValidUntil: personFacts.certificateValidUntil.default(null),
+  accessUntil: personFacts.accessUntil.default(null),
 });
 
-export const personChange = z.strictObject({ ...facts, active: z.boolean() }).partial();
+export const personChange = z.strictObject({ ...personFacts, active: z.boolean() }).partial();
 export type PersonChange = z.infer<typeof personChange>;
 
 export const listPeople = route({

@@ -2,7 +2,11 @@ import * as z from 'zod';
 import { between } from './primitives';
 import { MECHANISMS, TECHNIQUES } from './vocabulary';
 
-const months = z.number().int().min(1).max(240);
+/** A whole number between two bounds. */
+const whole = (low: number, high: number, unit: string) =>
+  between(low, high, unit).int({ error: `Give a whole number of ${unit}.` });
+
+const months = whole(1, 240, 'months');
 
 /** The site's rules for intervals, allowances and reminders; versioned, and cited by every assessment made under them. */
 export const siteRules = z.strictObject({
@@ -16,13 +20,13 @@ export const siteRules = z.strictObject({
   heightAllowanceMmByTechnique: z.record(z.enum(TECHNIQUES), between(0, 10, 'mm')),
   lengthAllowanceMmByTechnique: z.record(z.enum(TECHNIQUES), between(0, 50, 'mm')),
   /** Re-inspections due within this many days are "due soon". */
-  dueSoonDays: z.number().int().min(1).max(730),
+  dueSoonDays: whole(1, 730, 'days'),
   /** Days before the due date at which a reminder is sent, longest first. */
-  reminderLeadDays: z.array(z.number().int().min(0).max(400)).min(1).max(20),
+  reminderLeadDays: z.array(whole(0, 400, 'days')).min(1).max(20),
   /** Daily reminders go on while overdue. */
   remindWhileOverdue: z.boolean(),
   /** Working days for report and assessment between the inspection and the due date. */
-  reportingDays: z.number().int().min(0).max(60),
+  reportingDays: whole(0, 60, 'working days'),
 });
 export type SiteRules = z.infer<typeof siteRules>;
 
