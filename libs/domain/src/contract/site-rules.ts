@@ -22,7 +22,10 @@ export const siteRules = z.strictObject({
   /** Re-inspections due within this many days are "due soon". */
   dueSoonDays: whole(1, 730, 'days'),
   /** Days before the due date at which a reminder is sent, longest first. */
-  reminderLeadDays: z.array(whole(0, 400, 'days')).min(1).max(20),
+  reminderLeadDays: z
+    .array(whole(0, 400, 'days'))
+    .min(1)
+    .max(20),
   /** Daily reminders go on while overdue. */
   remindWhileOverdue: z.boolean(),
   /** Working days for report and assessment between the inspection and the due date. */
