@@ -94,9 +94,7 @@ describe('lockDataFolder', () => {
   it('lets exactly one of several newcomers take a stale lock over', async () => {
     leave({ ...ownIdentity(), pid: GONE });
     const startAt = String(Date.now() + 2500);
-    const results = await Promise.all(
-      Array.from({ length: 4 }, () => contend(folder, startAt)),
-    );
+    const results = await Promise.all(Array.from({ length: 4 }, () => contend(folder, startAt)));
     expect(results.toSorted()).toEqual(['in use', 'in use', 'in use', 'taken']);
   }, 20_000);
 });

@@ -54,10 +54,11 @@ describe('isAllowed', () => {
 });
 
 describe('mayWrite', () => {
-  it.each(['insert into t values (1)', 'with x as (delete from t returning *) select * from x', 'create table t ()'])(
-    'takes %s for a write',
-    (sql) => expect(mayWrite(sql)).toBe(true),
-  );
+  it.each([
+    'insert into t values (1)',
+    'with x as (delete from t returning *) select * from x',
+    'create table t ()',
+  ])('takes %s for a write', (sql) => expect(mayWrite(sql)).toBe(true));
 
   it.each(['select 1', 'with x as (select 1) select * from x', 'begin', 'rollback', '(select 1)'])(
     'takes %s for a read',
