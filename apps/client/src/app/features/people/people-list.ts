@@ -36,6 +36,13 @@ import { PeopleClient } from './people-client';
     MomentPipe,
   ],
   templateUrl: './people-list.html',
+  styles: `
+    @media (max-width: 700px) {
+      .wide-only {
+        display: none;
+      }
+    }
+  `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class PeopleList {

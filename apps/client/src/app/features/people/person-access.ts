@@ -13,6 +13,15 @@ import { PeopleClient } from './people-client';
   selector: 'app-person-access',
   imports: [MatButtonModule, DayPipe, MomentPipe],
   templateUrl: './person-access.html',
+  styles: `
+    :host {
+      display: block;
+      margin-top: 16px;
+    }
+    .choices {
+      margin-top: 12px;
+    }
+  `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class PersonAccess {

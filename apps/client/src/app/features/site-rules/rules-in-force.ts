@@ -10,7 +10,15 @@ import { QuantityPipe } from '../../shared/quantity/quantity-pipe';
   selector: 'app-rules-in-force',
   imports: [Caution, DayPipe, QuantityPipe],
   templateUrl: './rules-in-force.html',
-  styles: '.tables { margin: 16px 0; }',
+  styles: `
+    app-caution {
+      display: block;
+      margin-top: 16px;
+    }
+    .tables {
+      margin: 16px 0;
+    }
+  `,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class RulesInForce {

@@ -7,7 +7,7 @@ import { differenceRows } from './difference-rows';
   template: `
     @if (rows().length > 0) {
       <div class="scroll-x">
-        <table>
+        <table class="values">
           <caption class="visually-hidden">
             {{
               caption()
@@ -52,8 +52,10 @@ import { differenceRows } from './difference-rows';
       white-space: normal;
       color: var(--ink-2);
     }
-    td,
-    th {
+    // stands inside panels whose own tables start further in
+    .scroll-x .values td,
+    .scroll-x .values th:first-child,
+    .scroll-x .values th {
       padding: 3px 20px 3px 0;
     }
     td {
