@@ -76,7 +76,7 @@ export function lameHoopStress(
  * @returns membrane and bending hoop stress, bending positive at the bore [MPa]
  * @validity elastic, away from ends
  * @source Lamé; Pb = (6/t²) ∫ σ (t/2 − x) dx with x from the bore
- * @example thickHoopStress(mpa(10), mm(100), mm(10)).bending // 4.9887
+ * @example thickHoopStress(mpa(10), mm(100), mm(10)).bending // 4.990926765
  */
 export function thickHoopStress(pressure: MPa, insideRadius: Mm, thickness: Mm): WallStress {
   const outside = insideRadius + thickness;
@@ -99,7 +99,7 @@ export function thickHoopStress(pressure: MPa, insideRadius: Mm, thickness: Mm):
  * @returns required thickness without corrosion allowance [mm]
  * @validity p ≤ 0.385 f E
  * @source ASME VIII Division 1 UG-27 form (from memory)
- * @example requiredCylinderWall(mpa(2.6), mm(1300), mpa(138)) // 24.7730
+ * @example requiredCylinderWall(mpa(2.6), mm(1300), mpa(138)) // 24.7727939
  */
 export const requiredCylinderWall = (pressure: MPa, insideRadius: Mm, allowable: MPa) =>
   ((pressure * insideRadius) / (allowable - 0.6 * pressure)) as Mm;
@@ -112,7 +112,7 @@ export const requiredCylinderWall = (pressure: MPa, insideRadius: Mm, allowable:
  * @returns required thickness without corrosion allowance [mm]
  * @validity p ≤ 0.665 f E
  * @source ASME VIII Division 1 UG-27 form (from memory)
- * @example requiredSphereWall(mpa(1.8), mm(8000), mpa(163)) // 44.1961
+ * @example requiredSphereWall(mpa(1.8), mm(8000), mpa(163)) // 44.2206117
  */
 export const requiredSphereWall = (pressure: MPa, insideRadius: Mm, allowable: MPa) =>
   ((pressure * insideRadius) / (2 * allowable - 0.2 * pressure)) as Mm;

@@ -20,7 +20,7 @@ export function airThreshold(stressRatio: number): number {
  * @returns factor on the coefficient of a law with exponent 3 [-]
  * @validity simplified law, exponent 3
  * @source BS 7910 (from memory)
- * @example temperatureFactor(207000, 185000) // 1.40090
+ * @example temperatureFactor(207000, 185000) // 1.4008636
  */
 export const temperatureFactor = (modulusCold: number, modulusHot: number): number =>
   (modulusCold / modulusHot) ** 3;

@@ -22,7 +22,7 @@ export function bulgingFactor(lambda: number): number {
  * @returns bulging factor MT, exactly 1 without a crack [-]
  * @validity thin shell
  * @source BS 7910 Annex P, 2005 form (from memory)
- * @example foliasFactor(40, 762.5, 25) // 1.0649
+ * @example foliasFactor(40, 762.5, 25) // 1.065032902
  */
 export const foliasFactor = (c: number, radius: number, thickness: number): number =>
   Math.sqrt(1 + (1.6 * c * c) / (radius * thickness));

@@ -47,7 +47,7 @@ const bulgingLimit = (table: CurvatureTable): Limit => ({
  * @returns nothing; the answer stands in `into` [√mm]
  * @validity limits of the plate; Ri/t ≥ 5; correction at most 50 %
  * @source Newman and Raju, NASA TM-85793 (1984); curvature from own finite elements at Ri/t = 10
- * @example at(cylinderSurfaceInfluence, { a: 2, c: 10, t: 10, Ri: 1e9 }, 90, AXIAL_INSIDE).membrane // 2.7535
+ * @example at(cylinderSurfaceInfluence, { a: 2, c: 10, t: 10, Ri: 1e9 }, 90, AXIAL_INSIDE).membrane // 2.81275164
  */
 export function cylinderSurfaceInfluence(
   crack: Crack,
