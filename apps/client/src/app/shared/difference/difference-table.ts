@@ -22,7 +22,9 @@ import { differenceRows } from './difference-rows';
               @if (hasAfter()) {
                 <th scope="col">{{ hasBefore() ? 'After' : 'Recorded' }}</th>
               }
-              <th scope="col">Unit</th>
+              @if (hasUnits()) {
+                <th scope="col">Unit</th>
+              }
             </tr>
           </thead>
           <tbody>
@@ -35,7 +37,9 @@ import { differenceRows } from './difference-rows';
                 @if (hasAfter()) {
                   <td class="after">{{ row.after }}</td>
                 }
-                <td class="quiet">{{ row.unit }}</td>
+                @if (hasUnits()) {
+                  <td class="quiet">{{ row.unit }}</td>
+                }
               </tr>
             }
           </tbody>
@@ -79,6 +83,7 @@ export class DifferenceTable {
   protected readonly rows = computed(() =>
     differenceRows(this.before(), this.after(), this.timeZone()),
   );
+  protected readonly hasUnits = computed(() => this.rows().some(({ unit }) => unit !== ''));
   protected readonly hasBefore = computed(() => this.before() !== null);
   protected readonly hasAfter = computed(() => this.after() !== null);
 }
