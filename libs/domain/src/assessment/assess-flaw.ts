@@ -1,12 +1,11 @@
-import { optionOneLine } from '../fracture/fad/option-one-line';
-import { toMPaSqrtM } from '../units/convert';
 import type { AssessmentInput } from './assessment-input';
-import type { AssessmentOutcome, Refusal } from './assessment-outcome';
+import type { AssessedFlaw, AssessmentOutcome, Refusal } from './assessment-outcome';
 import { calculationSheet } from './calculation-sheet';
 import { cautions } from './cautions';
 import { characterise, type CharacterisedFlaw } from './characterise';
 import { checkInput } from './check-input';
 import { validityChecks, validityRefusals } from './check-validity';
+import { describeStanding } from './describe-standing';
 import { driversOf } from './drivers';
 import { ENGINE_VERSION } from './engine-version';
 import { flawCase } from './flaw-case';
@@ -46,66 +45,48 @@ function assessed(
   flaw: CharacterisedFlaw,
   section: Section,
 ): AssessmentOutcome {
-  const { evaluator } = section;
   const limiting = limitingSize(section, flaw);
   const point = standing(section, flaw);
+  const { path, events, life } = growthOf(input, flaw, section, point.reserveOnLoad >= 1);
   const verdict = judge({
     ...point,
-    lrMax: evaluator.lrMax,
+    lrMax: section.evaluator.lrMax,
     heightMm: flaw.height,
     limitingHeightMm: limiting.heightMm,
     allowanceMm: input.sizing.heightAllowanceMm.value,
   });
-  const drivers = driversOf(input);
-  const history =
-    point.reserveOnLoad < 1 ? null : followGrowth(section.flaw, flaw, drivers, input.horizonYears);
-  const life = history ? remainingLife(history, cyclesPerYear(drivers)) : NO_LIFE;
   const checks = validityChecks(section.limits, section.crackAt(flaw.a, flaw.c));
   const assumed = listAssumed(input);
-  const { kPrimary, kSecondary } = point.at;
-  const { stressIntensity, referenceStress } = evaluator.solutions;
   return {
     status: 'assessed',
     engineVersion: ENGINE_VERSION,
     ...verdict,
-    assessed: {
-      heightMm: flaw.height,
-      aMm: flaw.a,
-      cMm: flaw.c,
-      ligamentMm: section.ligament(flaw.a),
-    },
-    solution: { stressIntensity: stressIntensity.title, referenceStress: referenceStress.title },
-    residualMembraneMPa: point.residualMembrane,
-    residualBendingMPa: point.residualBending,
-    referenceStressMPa: point.referenceStress,
-    front: point.front,
-    governingAngleDeg: point.angle,
-    kPrimaryMPaSqrtM: toMPaSqrtM(kPrimary),
-    kSecondaryMPaSqrtM: toMPaSqrtM(kSecondary),
-    kr: point.kr,
-    lr: point.lr,
-    lrMax: evaluator.lrMax,
-    line: optionOneLine(section.flaw.material),
-    reserveOnLoad: point.reserveOnLoad,
-    reserveOnToughness: point.reserveOnToughness,
+    ...describeStanding(section, flaw, point),
     limitingHeightMm: limiting.heightMm,
     limitingBecause: limiting.because,
-    path: history?.path ?? [stateOf(section, { years: 0, a: flaw.a, c: flaw.c }, 0, 0)],
-    events: history?.events ?? [],
+    path,
+    events,
     life,
     checks,
-    cautions: cautions({
-      input,
-      flaw,
-      section,
-      kTotal: kPrimary + kSecondary,
-      kPrimary,
-      kSecondary,
-      lr: point.lr,
-      assumed,
-      checks,
-    }),
+    cautions: cautions({ input, flaw, section, point, assumed, checks }),
     assumed,
     sheet: calculationSheet({ input, flaw, section, point, limiting, life }),
   };
+}
+
+/** Growth and life of an acceptable flaw; one that is not acceptable has neither. */
+function growthOf(
+  input: AssessmentInput,
+  flaw: CharacterisedFlaw,
+  section: Section,
+  acceptable: boolean,
+): Pick<AssessedFlaw, 'path' | 'events' | 'life'> {
+  const drivers = driversOf(input);
+  if (!acceptable) {
+    const now = stateOf(section, { years: 0, a: flaw.a, c: flaw.c }, 0, cyclesPerYear(drivers));
+    return { path: [now], events: [], life: NO_LIFE };
+  }
+  const history = followGrowth(section.flaw, flaw, drivers, input.horizonYears);
+  const { path, events } = history;
+  return { path, events, life: remainingLife(history, cyclesPerYear(drivers)) };
 }

@@ -3,6 +3,7 @@ import type { AssessmentInput } from './assessment-input';
 import type { CharacterisedFlaw } from './characterise';
 import { number } from './number-text';
 import type { Section } from './section';
+import type { Standing } from './standing';
 
 const STANDING =
   'This result supports the judgement of a competent person; the code and regulations in force at the site and the owner’s procedures decide.';
@@ -11,17 +12,14 @@ export interface CautionSubject {
   readonly input: AssessmentInput;
   readonly flaw: CharacterisedFlaw;
   readonly section: Section;
-  readonly kTotal: number;
-  readonly kPrimary: number;
-  readonly kSecondary: number;
-  readonly lr: number;
+  readonly point: Standing;
   readonly assumed: readonly string[];
   readonly checks: readonly { readonly name: string; readonly near: boolean }[];
 }
 
 /** What the reader must know though it does not stop the verdict; the most telling first. */
 export function cautions(subject: CautionSubject): readonly string[] {
-  const { input, flaw, section, assumed, checks } = subject;
+  const { input, flaw, section, point, assumed, checks } = subject;
   const near = checks.filter((check) => check.near).map(({ name }) => name);
   return [
     elasticSize(subject),
@@ -37,7 +35,7 @@ export function cautions(subject: CautionSubject): readonly string[] {
     section.flaw.facePressure > 0 && input.growth.fatigue
       ? 'Pressure on the crack faces counts in the static check only: add its range to the membrane ranges of the cycle blocks.'
       : null,
-    chi(subject.kPrimary, subject.kSecondary, subject.lr) > CHI_SIMPLE_LIMIT
+    chi(point.at.kPrimary, point.at.kSecondary, point.lr) > CHI_SIMPLE_LIMIT
       ? 'Secondary stress is large against primary (χ above 4): the interaction term goes beyond the simple form.'
       : null,
     near.length > 0 ? `Close to a limit of the solution: ${near.join(', ')}.` : null,
@@ -49,7 +47,8 @@ export function cautions(subject: CautionSubject): readonly string[] {
 }
 
 /** Size demanded for linear-elastic use alone: 2.5 (K/σY)² against flaw and ligament. */
-function elasticSize({ flaw, section, kTotal }: CautionSubject): string | null {
+function elasticSize({ flaw, section, point }: CautionSubject): string | null {
+  const kTotal = point.at.kPrimary + point.at.kSecondary;
   const needed = 2.5 * (kTotal / section.flaw.material.yieldMPa) ** 2;
   const ligament = section.ligament(flaw.a);
   if (flaw.a >= needed && ligament >= needed) return null;

@@ -76,7 +76,9 @@ export class SectionEvaluator {
     let kr = 0;
     for (let i = 0; i <= DEEPEST; i++) {
       const here = this.frontAt(i, factor).kr;
-      if (here >= kr) [kr, governing] = [here, i];
+      if (here < kr) continue;
+      kr = here;
+      governing = i;
     }
     const referenceStress = factor * this.reference;
     return {

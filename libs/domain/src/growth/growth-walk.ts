@@ -28,10 +28,12 @@ export function growthStepper(
 ): Stepper {
   const rate: Rates = { a: 0, c: 0 };
   return dormandPrince(3, (y, slope) => {
-    const [a, c] = [Math.exp(y[1] as number), Math.exp(y[2] as number)];
+    const a = Math.exp(y[1] as number);
+    const c = Math.exp(y[2] as number);
     rates(a, c, rate);
     counted();
-    const [ra, rc] = [rate.a / a, rate.c / c];
+    const ra = rate.a / a;
+    const rc = rate.c / c;
     const fastest = Math.max(ra, rc);
     slope[0] = 1 / fastest;
     slope[1] = fastest > 0 ? ra / fastest : 0;

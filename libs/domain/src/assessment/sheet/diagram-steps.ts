@@ -3,93 +3,85 @@ import { toMPaSqrtM } from '../../units/convert';
 import type { CalculationStep } from '../assessment-outcome';
 import type { SheetSubject } from '../calculation-sheet';
 import { number } from '../number-text';
+import { stepIn } from './step-in';
 
 const OPTION_1 = 'BS 7910:2013 7.3.3, Option 1 (from memory)';
+const DEFINITION = 'BS 7910, R6: definition';
+const CONTINUOUS = '(1 + Lr²/2)^−½ [0.3 + 0.7 exp(−μ Lr⁶)] to Lr = 1, then f(1) Lr^((N−1)/(2N))';
+const PLATEAU = '(1 + Lr²/2)^−½ below Lr = 1 (yield plateau)';
+const INTERACTION =
+  '0.1 χ^0.714 − 0.007 χ² + 3·10⁻⁵ χ⁵ to Lr = 0.8, then falling to 0 at 1.05; χ = KIs Lr/KIp';
+
+const step = stepIn('Failure assessment diagram');
+const lrText = ({ point }: SheetSubject) => `Lr = ${number(point.lr)}`;
 
 /** The point on the diagram, the line above it and the reserves. */
-export function diagramSteps({ section, flaw, point, limiting }: SheetSubject): CalculationStep[] {
-  const { material, toughness } = section.flaw;
+export const diagramSteps = (subject: SheetSubject): CalculationStep[] => [
+  ...pointSteps(subject),
+  ...lineSteps(subject),
+  ...reserveSteps(subject),
+];
+
+function pointSteps(subject: SheetSubject): CalculationStep[] {
+  const { section, point } = subject;
   const { kPrimary, kSecondary, rho } = point.at;
-  const [ki, ks] = [number(toMPaSqrtM(kPrimary)), number(toMPaSqrtM(kSecondary))];
-  const lr = `Lr = ${number(point.lr)}`;
-  const step = (
-    symbol: string,
-    name: string,
-    value: number | string,
-    formula: string,
-    source: string,
-    inputs: readonly string[],
-    unit = '',
-  ): CalculationStep => ({
-    group: 'Failure assessment diagram',
-    symbol,
-    name,
-    value,
-    unit,
-    formula,
-    source,
-    inputs,
-  });
-  const strengths = [
-    `σY = ${number(material.yieldMPa)} MPa`,
-    `σU = ${number(material.tensileMPa)} MPa`,
+  const weight = number(chi(kPrimary, kSecondary, point.lr));
+  const inputs = [
+    `KIp = ${number(toMPaSqrtM(kPrimary))} MPa·√m`,
+    `KIs = ${number(toMPaSqrtM(kSecondary))} MPa·√m`,
+    `Kmat = ${number(toMPaSqrtM(section.flaw.toughness))} MPa·√m`,
+    `ρ = ${number(rho)}`,
   ];
-  const line = material.yieldPlateau
-    ? '(1 + Lr²/2)^−½ below Lr = 1 (yield plateau)'
-    : '(1 + Lr²/2)^−½ [0.3 + 0.7 exp(−μ Lr⁶)] to Lr = 1, then f(1) Lr^((N−1)/(2N))';
-  const weight = chi(kPrimary, kSecondary, point.lr);
   return [
-    step(
-      'ρ',
-      'Interaction of secondary with primary stress',
-      rho,
-      '0.1 χ^0.714 − 0.007 χ² + 3·10⁻⁵ χ⁵ to Lr = 0.8, then falling to 0 at 1.05; χ = KIs Lr/KIp',
-      'JCSS Probabilistic Model Code 3.12; BS 7910 (from memory)',
-      [`χ = ${number(weight)}`, lr],
-    ),
-    step('Kr', 'Fracture ratio', point.kr, '(KIp + KIs)/Kmat + ρ', 'BS 7910, R6', [
-      `KIp = ${ki} MPa·√m`,
-      `KIs = ${ks} MPa·√m`,
-      `Kmat = ${number(toMPaSqrtM(toughness))} MPa·√m`,
-      `ρ = ${number(rho)}`,
-    ]),
-    step('f(Lr)', 'Line of the diagram', point.line, line, OPTION_1, [
-      lr,
-      ...strengths,
-      `E = ${number(material.youngsModulusMPa)} MPa`,
-    ]),
-    step(
-      'Lr,max',
-      'Cut-off',
-      section.evaluator.lrMax,
-      material.yieldPlateau ? '1 (yield plateau)' : '(σY + σU)/(2 σY)',
-      OPTION_1,
-      strengths,
-    ),
-    step(
-      'FL',
-      'Reserve factor on load',
-      point.reserveOnLoad,
-      'first factor on primary load that reaches the line; ρ evaluated again at every trial',
-      'BS 7910, R6: definition',
-      [lr, `Kr = ${number(point.kr)}`],
-    ),
-    step(
-      'FK',
-      'Reserve factor on toughness',
-      point.reserveOnToughness ?? 'collapse governs',
-      'Kmat (f(Lr) − ρ)/(KIp + KIs), least over the front',
-      'algebra of the definition of Kr',
-      [`f(Lr) = ${number(point.line)}`],
-    ),
-    step(
-      'alim',
-      'Limiting through-wall extent at this length',
-      limiting.heightMm ?? 'none',
-      'first height that reaches the line, length unchanged',
-      limiting.because,
-      [`c = ${number(flaw.c)} mm`],
-      'mm',
-    ),
+    step('ρ', 'Interaction of secondary with primary stress', rho, '', {
+      formula: INTERACTION,
+      source: 'JCSS Probabilistic Model Code 3.12; BS 7910 (from memory)',
+      inputs: [`χ = ${weight}`, lrText(subject)],
+    }),
+    step('Kr', 'Fracture ratio', point.kr, '', {
+      formula: '(KIp + KIs)/Kmat + ρ',
+      source: DEFINITION,
+      inputs,
+    }),
+  ];
+}
+
+function lineSteps(subject: SheetSubject): CalculationStep[] {
+  const { section, point } = subject;
+  const { yieldMPa, tensileMPa, youngsModulusMPa, yieldPlateau } = section.flaw.material;
+  const strengths = [`σY = ${number(yieldMPa)} MPa`, `σU = ${number(tensileMPa)} MPa`];
+  return [
+    step('f(Lr)', 'Line of the diagram', point.line, '', {
+      formula: yieldPlateau ? PLATEAU : CONTINUOUS,
+      source: OPTION_1,
+      inputs: [lrText(subject), ...strengths, `E = ${number(youngsModulusMPa)} MPa`],
+    }),
+    step('Lr,max', 'Cut-off', section.evaluator.lrMax, '', {
+      formula: yieldPlateau ? '1 (yield plateau)' : '(σY + σU)/(2 σY)',
+      source: OPTION_1,
+      inputs: strengths,
+    }),
+  ];
+}
+
+function reserveSteps(subject: SheetSubject): CalculationStep[] {
+  const { flaw, point, limiting } = subject;
+  return [
+    step('FL', 'Reserve factor on load', point.reserveOnLoad, '', {
+      formula:
+        'first factor on primary load that reaches the line; ρ evaluated again at every trial',
+      source: DEFINITION,
+      inputs: [lrText(subject), `Kr = ${number(point.kr)}`],
+    }),
+    step('FK', 'Reserve factor on toughness', point.reserveOnToughness ?? 'collapse governs', '', {
+      formula: 'Kmat (f(Lr) − ρ)/(KIp + KIs), least over the front',
+      source: 'algebra of the definition of Kr',
+      inputs: [`f(Lr) = ${number(point.line)}`],
+    }),
+    step('hlim', 'Limiting through-wall extent at this length', limiting.heightMm ?? 'none', 'mm', {
+      formula: 'first height that reaches the line, length unchanged',
+      source: limiting.because,
+      inputs: [`c = ${number(flaw.c)} mm`],
+    }),
   ];
 }

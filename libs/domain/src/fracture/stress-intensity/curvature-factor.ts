@@ -29,30 +29,29 @@ export function curvatureShare(share: CurvatureShare, crack: Crack, angle: Degre
   const aspect = a / c;
   const depth = Math.min(a / thickness, 0.8);
   const longWeight = (ROUND - Math.min(Math.max(aspect, LONG), ROUND)) / (ROUND - LONG);
-  const change =
-    longWeight * throughDepth(share.long, depth, angle) +
-    (1 - longWeight) * throughDepth(share.round, depth, angle);
+  const long = longWeight > 0 ? longWeight * throughDepth(share.long, depth, angle) : 0;
+  const round = longWeight < 1 ? (1 - longWeight) * throughDepth(share.round, depth, angle) : 0;
+  const change = long + round;
   const thinness = thickness / insideRadius / CURVATURE_AT;
   const bulging = aspect < LONG ? (LONG / aspect) ** 2 : 1;
   return change > 0 ? change * thinness * bulging : change * Math.min(thinness, 1);
 }
 
 /** Quadratic through 0 at no depth and the rows at a/t = 0.2 and 0.8. */
-function throughDepth([shallow, deep]: CurvatureRows, depth: number, angle: number): number {
-  const [s2, s8] = [alongFront(shallow, angle), alongFront(deep, angle)];
-  const second = (s8 - 4 * s2) / 0.48;
+function throughDepth(rows: CurvatureRows, depth: number, angle: number): number {
+  const s2 = alongFront(rows[0], angle);
+  const second = (alongFront(rows[1], angle) - 4 * s2) / 0.48;
   const first = (s2 - 0.04 * second) / 0.2;
   return (first + second * depth) * depth;
 }
 
+/** Straight between the angles of a row; below the first angle its value is held. */
 function alongFront(row: readonly number[], angle: number): number {
-  const last = CURVATURE_ANGLES.length - 1;
-  for (let i = 0; i < last; i++) {
-    const [from, to] = [CURVATURE_ANGLES[i] ?? 0, CURVATURE_ANGLES[i + 1] ?? 90];
-    if (angle > to && i < last - 1) continue;
-    const [low, high] = [row[i] ?? 0, row[i + 1] ?? 0];
-    const part = Math.min(Math.max((angle - from) / (to - from), 0), 1);
-    return low + part * (high - low);
-  }
-  return 0;
+  let i = 0;
+  while (i < CURVATURE_ANGLES.length - 2 && angle > (CURVATURE_ANGLES[i + 1] ?? 90)) i++;
+  const from = CURVATURE_ANGLES[i] ?? 0;
+  const to = CURVATURE_ANGLES[i + 1] ?? 90;
+  const part = Math.min(Math.max((angle - from) / (to - from), 0), 1);
+  const low = row[i] ?? 0;
+  return low + part * ((row[i + 1] ?? 0) - low);
 }
