@@ -27,6 +27,8 @@ const angular = presets.createEsmPreset({ tsconfig: '<rootDir>/apps/client/tscon
 
 /** @type {import('jest').Config} */
 export default {
+  // the machine that runs this may be busy; a test that hangs still ends
+  testTimeout: 60_000,
   projects: [
     node('domain', ['libs/domain/src']),
     node('api', ['apps/api/src', 'tests/api', 'tests/support']),

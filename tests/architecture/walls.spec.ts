@@ -54,7 +54,7 @@ const REST: Readonly<Record<string, readonly string[]>> = {
   'client/features': ['client/core', 'client/shared', ...BROWSER_ROOMS],
   'client/root': ['client/core', 'client/shared', 'client/features', 'domain/contract'],
   seeds: [...EVERY_DOMAIN_ROOM, 'api/modules', 'api/db', 'api/http', 'api/root', 'api/mail'],
-  db: ['domain/schema', 'domain/contract', 'api/db'],
+  db: ['domain/schema', 'domain/contract', 'api/db', 'api/root'],
 };
 
 const files = ['libs', 'apps', 'seeds', 'db'].flatMap((folder) => sourcesIn(join(ROOT, folder)));
@@ -82,8 +82,9 @@ describe('the walls between rooms', () => {
     const module = (path: string) => /api\/src\/modules\/([^/]+)\//.exec(path)?.[1];
     const strays = imports()
       .filter(
-        ({ file, target }) =>
-          /\.repository(\.ts)?$/.test(target) && module(file) !== module(target),
+        // the type of a record may be known elsewhere, the way to read and write it may not
+        ({ file, target, typeOnly }) =>
+          !typeOnly && /\.repository(\.ts)?$/.test(target) && module(file) !== module(target),
       )
       .map(({ file, target }) => `${file} → ${target}`);
     expect(strays).toEqual([]);

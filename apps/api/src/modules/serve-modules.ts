@@ -12,6 +12,10 @@ import { serveSearch } from './search/search.routes';
 import { serveUnits } from './units/units.routes';
 import { serveAssessments } from './assessments/assessments.routes';
 import { serveFlaws } from './flaws/flaws.routes';
+import { serveDocuments } from './documents/documents.routes';
+import { serveFindings } from './findings/findings.routes';
+import { serveImports } from './imports/imports.routes';
+import { serveInspections } from './inspections/inspections.routes';
 
 /** Every module's routes, in one list. */
 export function serveModules(api: Api, deps: Deps): void {
@@ -27,4 +31,8 @@ export function serveModules(api: Api, deps: Deps): void {
   serveSearch(api, deps);
   serveFlaws(api, deps);
   serveAssessments(api, deps);
+  serveInspections(api, deps);
+  serveDocuments(api, deps);
+  serveImports(api, deps);
+  serveFindings(api, deps);
 }

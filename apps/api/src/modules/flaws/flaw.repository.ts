@@ -113,6 +113,43 @@ export const flawRepository = (db: Database) => ({
     return row;
   },
 
+  async add(values: typeof flaws.$inferInsert): Promise<FlawRecord | undefined> {
+    const [row] = await db.insert(flaws).values(values).returning();
+    return row;
+  },
+
+  /** Highest running number among a component's flaws; 0 when it has none. */
+  async highestNumber(componentId: string): Promise<number> {
+    const [row] = await db
+      .select({
+        highest: sql<number>`coalesce(max(substring(${flaws.number} from '-F([0-9]+)$')::int), 0)`,
+      })
+      .from(flaws)
+      .where(eq(flaws.componentId, componentId));
+    return row?.highest ?? 0;
+  },
+
+  /** Flaws of one weld that may be found again, with their newest size. */
+  ofLocation: (locationId: string) =>
+    db
+      .select({
+        flawId: flaws.id,
+        number: flaws.number,
+        axialMm: flaws.axialMm,
+        circumferentialMm: flaws.circumferentialMm,
+        heightMm: sql<
+          number | null
+        >`(select n.height_mm from findings n where n.flaw_id = ${flaws.id} order by n.inspected_on desc limit 1)`,
+        lengthMm: sql<
+          number | null
+        >`(select n.length_mm from findings n where n.flaw_id = ${flaws.id} order by n.inspected_on desc limit 1)`,
+        inspectedOn: sql<
+          string | null
+        >`(select max(n.inspected_on)::text from findings n where n.flaw_id = ${flaws.id})`,
+      })
+      .from(flaws)
+      .where(and(eq(flaws.locationId, locationId), notInArray(flaws.state, ['removed', 'closed']))),
+
   async change(
     siteId: string,
     id: string,
