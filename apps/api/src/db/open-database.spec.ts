@@ -75,12 +75,14 @@ describe('openDatabase', () => {
   }, 30_000);
 
   it('brings statistics up to date and writes a checkpoint on request', async () => {
+    await database.db.insert(sites).values({ code: 'STAT', name: 'Counted', timeZone: 'UTC' });
     await database.analyze();
     await database.checkpoint();
-    const { rows } = (await database.db.execute(
-      sql`select count(*)::int as n from pg_stats where schemaname = 'public'`,
-    )) as unknown as { rows: unknown[] };
-    expect(rows).toEqual([{ n: expect.any(Number) }]);
+    const counted = await database.db.execute(
+      sql`select n_distinct from pg_stats where tablename = 'sites' and attname = 'code'`,
+    );
+    expect(counted).toMatchObject({ rows: [{ n_distinct: -1 }] });
+    await database.db.delete(sites);
   });
 
   it('gives the folder back, and a second start changes nothing', async () => {
@@ -125,19 +127,13 @@ describe('a process killed while it writes', () => {
   it('loses nothing it has acknowledged, and the next start takes the lock over', async () => {
     const dataDir = newFolder();
     await layMigratedDatabase(join(dataDir, 'database'));
-    let acknowledged = 0;
-    for (const target of [25, 60]) {
-      const { said } = await write(dataDir, (lines) => lines.length >= target - acknowledged);
-      acknowledged += said.length;
-      const database = await open(dataDir);
-      const [row] = await database.db.select({ n: count() }).from(sites);
-      // one more may have been written without its answer having arrived
-      expect(row?.n).toBeGreaterThanOrEqual(acknowledged);
-      expect(row?.n).toBeLessThanOrEqual(acknowledged + 2);
-      await database.db.update(sites).set({ code: sql`gen_random_uuid()::text` });
-      acknowledged = row?.n ?? 0;
-      await database.close();
-    }
+    const { said } = await write(dataDir, (lines) => lines.length >= 40);
+    const database = await open(dataDir);
+    const [row] = await database.db.select({ n: count() }).from(sites);
+    // one more may have been written without its answer having arrived
+    expect(row?.n).toBeGreaterThanOrEqual(said.length);
+    expect(row?.n).toBeLessThanOrEqual(said.length + 1);
+    await database.close();
   }, 60_000);
 });
 
