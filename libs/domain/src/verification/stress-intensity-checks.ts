@@ -1,3 +1,4 @@
+import { freeStripFactor } from '../fracture/stress-intensity/free-strip-factor';
 import { newmanRaju1980 } from '../fracture/stress-intensity/newman-raju-1980';
 import { PLATE_EMBEDDED_K } from '../fracture/stress-intensity/plate-embedded-k';
 import { PLATE_SURFACE_K } from '../fracture/stress-intensity/plate-surface-k';
@@ -133,11 +134,32 @@ const shapes = SHAPE.map(([a, q], i) =>
   ),
 );
 
+const STRIP = [
+  [0.2, 1.3654],
+  [0.4, 2.1068],
+  [0.5, 2.8254],
+  [0.6, 4.042],
+  [0.8, 11.991],
+] as const;
+const strip = STRIP.map(([depth, f], i) =>
+  row(
+    `KF-${i + 1}`,
+    `F of an edge crack in a strip free to bend, a/t ${depth}`,
+    f,
+    '',
+    0.006,
+    'from memory',
+    'influence coefficients for a flat plate, column of the longest flaw (from memory)',
+    () => freeStripFactor(depth),
+  ),
+);
+
 export const STRESS_INTENSITY_CHECKS: readonly CheckRow[] = [
   ...shapes,
   ...surface,
   ...embedded,
   ...pressurised,
   ...tables,
+  ...strip,
   ...LIMITS,
 ];

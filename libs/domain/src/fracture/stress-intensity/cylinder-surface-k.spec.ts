@@ -8,7 +8,9 @@ import { curvatureShare } from './curvature-factor';
 import { AXIAL_INSIDE, AXIAL_OUTSIDE, CIRCUMFERENTIAL_INSIDE } from './curvature-table';
 import { CYLINDER_AXIAL_INSIDE_K, CYLINDER_AXIAL_OUTSIDE_K } from './cylinder-surface-k';
 import { newmanRaju1980 } from './newman-raju-1980';
+import { freeStripFactor } from './free-strip-factor';
 import { PLATE_SURFACE_K } from './plate-surface-k';
+import { insideLimits } from '../../geometry/limit';
 
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
 const CYLINDERS = [
@@ -101,6 +103,29 @@ describe('surface flaws in a cylinder', () => {
         lameHoopStress(mpa(10), crackOf(crack).insideRadius, (Ri + 10) as never, Ri as never),
       ).toBeGreaterThan(membrane);
     }
+  });
+
+  it('never exceeds the free strip by curvature, however long the flaw', () => {
+    fc.assert(
+      fc.property(
+        between(0.05, 0.75),
+        between(0.005, 0.2),
+        between(5, 60),
+        (depth, aspect, wall) => {
+          const crack = { a: 1, c: 1 / aspect, t: 1 / depth, Ri: wall / depth };
+          const { membrane } = influenceOf(CYLINDER_AXIAL_OUTSIDE_K, crack, 90);
+          const plate = influenceOf(PLATE_SURFACE_K, crack, 90).membrane;
+          expect(membrane).toBeLessThanOrEqual(
+            Math.max(plate, freeStripFactor(depth) * Math.sqrt(Math.PI)) * (1 + 1e-12),
+          );
+        },
+      ),
+    );
+  });
+
+  it('accepts a shallow, very long outside flaw: curvature can do little there', () => {
+    const limits = CYLINDER_AXIAL_OUTSIDE_K.limits;
+    expect(insideLimits(limits, crackOf({ a: 2, c: 200, t: 10, Ri: 100 }))).toBe(true);
   });
 
   it('stays within what long axial cracks allow for a long outside flaw', () => {

@@ -9,10 +9,25 @@ import {
   CURVATURE_SOURCE,
   type CurvatureTable,
 } from './curvature-table';
+import { freeStripFactor } from './free-strip-factor';
 import { PLATE_SURFACE_K, PLATE_SURFACE_LIMITS, plateSurfaceInfluence } from './plate-surface-k';
 import type { Influence, StressIntensitySolution } from './solution';
 
 const SOURCE = `${PLATE_SURFACE_K.source}; curvature: ${CURVATURE_SOURCE}`;
+
+const DEEPEST = 90 as Degrees;
+const SCRATCH: Influence = { membrane: 0, bending: 0, reversedBending: 0 };
+
+/**
+ * Curvature share of the uniform coefficient, never beyond what a crack of unlimited length in a strip free
+ * to bend has: no crack of that depth in a cylinder has more.
+ */
+function uniformShare(crack: Crack, angle: Degrees, plate: number, table: CurvatureTable): number {
+  const share = curvatureShare(table.uniform, crack, angle);
+  if (share <= 0) return share;
+  const longest = Math.sqrt(Math.PI * crack.a) * freeStripFactor(crack.a / crack.thickness);
+  return Math.min(share, Math.max(longest / plate - 1, 0));
+}
 
 const WALL_LIMIT: Limit = {
   name: 'Ri/t',
@@ -30,7 +45,10 @@ const bulgingLimit = (table: CurvatureTable): Limit => ({
   text: 'curvature raises K at the deepest point by at most 50 %',
   min: -1,
   max: 0.5,
-  measure: (crack) => curvatureShare(table.uniform, crack, 90 as Degrees),
+  measure: (crack) => {
+    plateSurfaceInfluence(crack, DEEPEST, SCRATCH);
+    return uniformShare(crack, DEEPEST, SCRATCH.membrane, table);
+  },
   source: CURVATURE_SOURCE,
   input: 'flaw.lengthMm',
   instead:
@@ -59,8 +77,12 @@ export function cylinderSurfaceInfluence(
   const uniform = into.membrane;
   // 2 (a/t) G1 of the plate: what bending lacks against membrane
   const linear = uniform - into.bending;
-  into.membrane = uniform * (1 + curvatureShare(table.uniform, crack, angle));
-  into.bending = into.membrane - linear * (1 + curvatureShare(table.linear, crack, angle));
+  const free = curvatureShare(table.uniform, crack, angle);
+  const share = uniformShare(crack, angle, uniform, table);
+  // where the uniform share is held back, the linear one is held back alike
+  const held = free > 0 ? share / free : 1;
+  into.membrane = uniform * (1 + share);
+  into.bending = into.membrane - linear * (1 + held * curvatureShare(table.linear, crack, angle));
   into.reversedBending = -into.bending;
 }
 
