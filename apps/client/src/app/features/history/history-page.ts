@@ -3,7 +3,7 @@ import { toObservable, toSignal } from '@angular/core/rxjs-interop';
 import { MatButtonModule } from '@angular/material/button';
 import { ActivatedRoute, RouterLink } from '@angular/router';
 import type { HistoryEntry } from '@ligament/domain/contract/history';
-import { catchError, combineLatest, of, startWith, switchMap } from 'rxjs';
+import { catchError, of, switchMap } from 'rxjs';
 import { loadable, LOADING, valueOf } from '../../core/http/loadable';
 import { Session } from '../../core/session/session';
 import { type Crumb, PageHeader } from '../../shared/page-header/page-header';
@@ -87,18 +87,18 @@ export class HistoryPage {
     ),
     { initialValue: [] },
   );
-  protected readonly tag = toSignal(
-    combineLatest([toObservable(this.component)]).pipe(
-      switchMap(([id]) =>
-        id
-          ? this.client.componentTag(id).pipe(
-              catchError(() => of('')),
-              startWith(''),
-            )
-          : of(''),
-      ),
+  private readonly readTag = toSignal(
+    toObservable(this.component).pipe(
+      switchMap((id) => (id ? this.client.componentTag(id) : of(''))),
+      catchError(() => of('')),
     ),
     { initialValue: '' },
+  );
+  /** From the register, or as the entries name it. */
+  protected readonly tag = computed(
+    () =>
+      this.readTag() ||
+      (valueOf(this.entries())?.rows.find((entry) => entry.componentTag)?.componentTag ?? ''),
   );
   protected readonly title = computed(() =>
     this.component() ? `History of ${this.tag() || 'a component'}` : 'History',
