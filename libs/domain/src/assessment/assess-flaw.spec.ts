@@ -110,7 +110,7 @@ describe('assessFlaw', () => {
 
   it('refuses a very long deep flaw rather than stretch the plate equation', () => {
     const { refusals } = refuse({ height: 18.5, length: 2000 });
-    expect(refusals[0]?.limit).toBe('a/t ≤ 1.25 (a/c + 0.6) when a/c < 0.2');
+    expect(refusals[0]?.limit).toMatch(/a\/t ≤ 1\.25 \(a\/c \+ 0\.6\)/);
   });
 
   it('names the solutions it chose', () => {

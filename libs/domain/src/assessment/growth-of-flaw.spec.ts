@@ -27,7 +27,7 @@ describe('the growing flaw', () => {
 
   it('never states a figure beyond 40 years', () => {
     const flaw = assess({ cycles: 1, horizon: 60 });
-    expect(flaw.life.because).toMatch(/all 40 years it was followed and beyond/);
+    expect(flaw.life.because).toMatch(/the whole time it was followed, more than 40 years/);
   });
 
   it('does not grow below the threshold', () => {

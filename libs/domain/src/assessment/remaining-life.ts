@@ -30,14 +30,15 @@ export function remainingLife(history: GrowthHistory, cyclesPerYear: number): Re
   };
 }
 
-function because({ end, validityLimit, years: exact }: GrowthHistory, years: number): string {
+function because({ end, validityLimit }: GrowthHistory, years: number): string {
+  const after = years > LONGEST_STATED ? `more than ${LONGEST_STATED} years` : `${years} years`;
   switch (end) {
     case 'limit reached':
-      return `The growing flaw reaches the line of the failure assessment diagram after ${years} years.`;
+      return `The growing flaw reaches the line of the failure assessment diagram after ${after}.`;
     case 'outside validity':
-      return `After ${years} years the growing flaw leaves the range of the solution (${validityLimit ?? 'limit not named'}); it is not followed further.`;
+      return `After ${after} the growing flaw leaves the range of the solution (${validityLimit ?? 'limit not named'}); it is not followed further.`;
     case 'horizon':
-      return `The flaw stays acceptable for all ${Math.min(exact, LONGEST_STATED)} years it was followed${exact > LONGEST_STATED ? ' and beyond' : ''}; growth beyond the horizon was not looked at.`;
+      return `The flaw stays acceptable for the whole time it was followed, ${after}; growth beyond was not looked at.`;
     case 'no growth':
       return 'No part of the flaw grows under the given cycles and rates.';
     default:

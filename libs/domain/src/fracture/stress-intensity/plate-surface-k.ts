@@ -24,8 +24,8 @@ export const PLATE_SURFACE_LIMITS: readonly Limit[] = [
     instead: DEEP,
   },
   {
-    name: 'a/t of a long crack',
-    text: 'a/t ≤ 1.25 (a/c + 0.6) when a/c < 0.2',
+    name: '(a/t)/[1.25 (a/c + 0.6)]',
+    text: 'a/t ≤ 1.25 (a/c + 0.6) for a flaw longer than a/c = 0.2: ratio ≤ 1',
     min: 0,
     max: 1,
     // as a ratio of the two sides, 0 where the rule does not apply
