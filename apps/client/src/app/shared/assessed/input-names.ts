@@ -1,0 +1,57 @@
+/** Name and unit of every input, by its path; places of a list stand as `*`. */
+const NAMES: Readonly<Record<string, readonly [name: string, unit: string]>> = {
+  'wall.shape': ['Wall taken as', ''],
+  'wall.thicknessMm': ['Wall thickness', 'mm'],
+  'wall.insideDiameterMm': ['Inside diameter', 'mm'],
+  'wall.widthMm': ['Plate width', 'mm'],
+  'flaw.kind': ['Kind of flaw', ''],
+  'flaw.face': ['Face', ''],
+  'flaw.orientation': ['Orientation', ''],
+  'flaw.heightMm': ['Through-wall extent, measured', 'mm'],
+  'flaw.lengthMm': ['Length 2c, measured', 'mm'],
+  'flaw.ligamentMm': ['Ligament to the face', 'mm'],
+  'sizing.heightAllowanceMm': ['Height allowance', 'mm'],
+  'sizing.lengthAllowanceMm': ['Length allowance', 'mm'],
+  'stress.primaryMembraneMPa': ['Primary membrane stress', 'MPa'],
+  'stress.primaryBendingMPa': ['Primary bending stress', 'MPa'],
+  'stress.residual.state': ['Residual stress taken as', ''],
+  'stress.residual.membraneMPa': ['Residual membrane stress', 'MPa'],
+  'stress.residual.bendingMPa': ['Residual bending stress', 'MPa'],
+  'stress.residual.flawToWeld': ['Flaw against the weld', ''],
+  'stress.crackFacePressureMPa': ['Pressure on the crack faces', 'MPa'],
+  'material.yieldMPa': ['Yield strength', 'MPa'],
+  'material.tensileMPa': ['Tensile strength', 'MPa'],
+  'material.youngsModulusMPa': ['Young’s modulus', 'MPa'],
+  'material.poissonsRatio': ['Poisson’s ratio', ''],
+  'material.toughnessMPaSqrtM': ['Fracture toughness', 'MPa√m'],
+  'material.yieldPlateau': ['Yield plateau', ''],
+  'growth.fatigue.law.title': ['Growth law', ''],
+  'growth.fatigue.law.key': ['Growth law, key', ''],
+  'growth.fatigue.law.source': ['Growth law, source', ''],
+  'growth.fatigue.law.thresholdMPaSqrtMm': ['Threshold', 'MPa√mm'],
+  'growth.fatigue.law.stages.*.coefficient': ['Growth coefficient', ''],
+  'growth.fatigue.law.stages.*.exponent': ['Growth exponent', ''],
+  'growth.fatigue.blocks.*.membraneRangeMPa': ['Membrane range', 'MPa'],
+  'growth.fatigue.blocks.*.bendingRangeMPa': ['Bending range', 'MPa'],
+  'growth.fatigue.blocks.*.cyclesPerYear': ['Cycles', 'per year'],
+  'growth.fatigue.blocks.*.note': ['Block', ''],
+  'growth.stressCorrosion.depthRateMmPerYear': ['Growth rate into the wall', 'mm/year'],
+  'growth.stressCorrosion.endRateMmPerYear': ['Growth rate at each end', 'mm/year'],
+  horizonYears: ['Growth followed for', 'years'],
+};
+
+export interface InputName {
+  readonly name: string;
+  readonly unit: string;
+}
+
+/** An input in the trade's words, from its path in the record, e.g. `growth.fatigue.blocks.0.cyclesPerYear`. */
+export function inputName(path: string): InputName {
+  const places = [...path.matchAll(/\.(\d+)(?=\.|$)/g)].map(([, place]) => Number(place) + 1);
+  const [name, unit] = NAMES[path.replaceAll(/\.\d+(?=\.|$)/g, '.*')] ?? [path, ''];
+  return { name: places.length > 0 ? `${name}, ${places.join(', ')}` : name, unit };
+}
+
+/** Names of the inputs that are only assumed, for the caution beside a verdict. */
+export const assumedNames = (paths: readonly string[]): string[] =>
+  paths.map((path) => inputName(path).name.toLowerCase());
