@@ -1,6 +1,6 @@
 import type { RouteContract } from '@ligament/domain/contract/route';
 import { problem } from '@ligament/domain/contract/primitives';
-import { z } from 'zod';
+import * as z from 'zod';
 
 type Schema = Record<string, unknown>;
 
