@@ -2,7 +2,8 @@ import { CURVATURE_CHECKS } from './curvature-checks';
 import { evaluateRow, type CheckResult, type CheckRow } from './check-row';
 import { DIAGRAM_CHECKS } from './diagram-checks';
 import { END_TO_END_CHECKS } from './end-to-end-checks';
-import { GROWTH_CHECKS } from './growth-checks';
+import { GROWTH_LAW_CHECKS } from './growth-law-checks';
+import { GROWTH_LIFE_CHECKS } from './growth-life-checks';
 import { LIMITING_SIZE_CHECKS } from './limiting-size-checks';
 import { PRESSURE_CHECKS } from './pressure-checks';
 import { REFERENCE_STRESS_CHECKS } from './reference-stress-checks';
@@ -17,7 +18,8 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...CURVATURE_CHECKS,
   ...REFERENCE_STRESS_CHECKS,
   ...DIAGRAM_CHECKS,
-  ...GROWTH_CHECKS,
+  ...GROWTH_LAW_CHECKS,
+  ...GROWTH_LIFE_CHECKS,
   ...LIMITING_SIZE_CHECKS,
   ...END_TO_END_CHECKS,
 ];

@@ -1,77 +1,10 @@
-import { growthPerCycle, transition, type GrowthLaw } from '../growth/growth-law';
+import { PLATE_SURFACE_K } from '../fracture/stress-intensity/plate-surface-k';
+import type { GrowthLaw } from '../growth/growth-law';
 import { ratesPerYear } from '../growth/growth-rates';
 import { integrateGrowth } from '../growth/integrate-growth';
-import { GROWTH_LAWS, growthLaw } from '../materials/growth-laws';
-import { airThreshold } from '../materials/growth-threshold';
-import type { CheckKind, CheckRow } from './check-row';
-import { PLATE_SURFACE_K } from '../fracture/stress-intensity/plate-surface-k';
+import type { CheckRow } from './check-row';
 import { kOf } from './crack-of';
-
-const TABLE =
-  'BS 7910:2013 two-stage table (constants and transition both from memory; their agreement is the check)';
-
-const row = (
-  id: string,
-  quantity: string,
-  published: number,
-  unit: string,
-  tolerance: number,
-  kind: CheckKind,
-  source: string,
-  compute: () => number,
-): CheckRow => ({
-  id,
-  group: 'Crack growth',
-  quantity,
-  published,
-  unit,
-  tolerance,
-  kind,
-  source,
-  compute,
-});
-
-/** Tabulated transitions in the order of the library's two-stage laws [MPa·√mm]. */
-const TRANSITIONS = [
-  363, 315, 196, 144, 1336, 993, 1098, 748, 462, 434, 323, 290, 576, 514, 517, 415,
-];
-
-const transitions = GROWTH_LAWS.filter(({ stages }) => stages.length === 2).map(
-  ({ title, stages: [lower, upper] }, i) =>
-    row(
-      `GT-${i + 1}`,
-      `transition: ${title}`,
-      TRANSITIONS[i] ?? 0,
-      'MPa·√mm',
-      0.004,
-      'from memory',
-      TABLE,
-      () => (lower && upper ? transition(lower, upper) : Number.NaN),
-    ),
-);
-
-const UPPER = growthLaw('steel-air-high-upper');
-const rateAt = (range: number) =>
-  UPPER ? growthPerCycle({ ...UPPER, thresholdMPaSqrtMm: 0 })(range) : Number.NaN;
-const RATES = [
-  [80, 1.06654265306366e-7],
-  [144, 2.121649735509455e-6],
-  [300, 1.756705349841104e-5],
-  [1000, 0.0005631054235898137],
-] as const;
-const rates = RATES.map(([range, rate], i) =>
-  // the table's rounded transition (144) and the exact meeting point (143.6) lie 0.4 % apart
-  row(
-    `GR-${i + 1}`,
-    `da/dN at ΔK = ${range}, air, R ≥ 0.5, mean + 2 SD`,
-    rate,
-    'mm/cycle',
-    range === 144 ? 0.01 : 1e-9,
-    'from memory',
-    TABLE,
-    () => rateAt(range),
-  ),
-);
+import { growthRow as row } from './growth-row';
 
 /** Cycles from a0 to a1 with K = Y ΔS √(πa), one cycle counted as a year. */
 function cyclesTo(
@@ -146,69 +79,26 @@ const superposed = () => {
   return into.a;
 };
 
-export const GROWTH_CHECKS: readonly CheckRow[] = [
-  ...transitions,
-  ...rates,
+const CLOSED_FORMS = [
+  [3, 5.21e-13, 1.12, 463_382.7876389821],
+  [2, 1e-10, 1, 1_145_211.873249106],
+  [4, 1e-15, 1, 1_113_147.769508105],
+] as const;
+const closed = CLOSED_FORMS.map(([m, coefficient, y, cycles], i) =>
   row(
-    'GH-1',
-    'threshold at R = 0.25',
-    116.5,
-    'MPa·√mm',
-    1e-9,
-    'from memory',
-    'BS 7910, IIW (from memory)',
-    () => airThreshold(0.25),
-  ),
-  row(
-    'GH-2',
-    'threshold at R = 0',
-    170,
-    'MPa·√mm',
-    1e-9,
-    'from memory',
-    'BS 7910, IIW (from memory)',
-    () => airThreshold(0),
-  ),
-  row(
-    'GH-3',
-    'threshold at R = −0.5',
-    170,
-    'MPa·√mm',
-    1e-9,
-    'from memory',
-    'BS 7910, IIW (from memory)',
-    () => airThreshold(-0.5),
-  ),
-  row(
-    'GL-1',
-    'cycles from 2 to 20 mm, m = 3',
-    463_382.7876389821,
+    `GL-${i + 1}`,
+    `cycles from 2 to 20 mm, m = ${m}`,
+    cycles,
     'cycles',
     1e-5,
     'closed form',
     CLOSED,
-    () => cyclesTo(2, 20, paris(5.21e-13, 3), [[80, 1]], 1.12),
+    () => cyclesTo(2, 20, paris(coefficient, m), [[80, 1]], y),
   ),
-  row(
-    'GL-2',
-    'cycles from 2 to 20 mm, m = 2',
-    1_145_211.873249106,
-    'cycles',
-    1e-5,
-    'closed form',
-    CLOSED,
-    () => cyclesTo(2, 20, paris(1e-10, 2), [[80, 1]], 1),
-  ),
-  row(
-    'GL-3',
-    'cycles from 2 to 20 mm, m = 4',
-    1_113_147.769508105,
-    'cycles',
-    1e-5,
-    'closed form',
-    CLOSED,
-    () => cyclesTo(2, 20, paris(1e-15, 4), [[80, 1]], 1),
-  ),
+);
+
+export const GROWTH_LIFE_CHECKS: readonly CheckRow[] = [
+  ...closed,
   row(
     'GL-4',
     'years of a three-block spectrum from 2 to 20 mm',
