@@ -171,6 +171,25 @@ describe('laws that hold for every flaw', () => {
     );
   });
 
+  it('changes little when an input changes little', () => {
+    const nudge = 1e-7;
+    fc.assert(
+      fc.property(
+        sound,
+        fc.constantFrom('height', 'length', 'membrane', 'toughness', 'thickness'),
+        (v, what) =>
+          pair(v, { ...v, [what]: (v[what as 'height'] ?? 0) * (1 + nudge) }, (before, after) => {
+            expect(after.reserveOnLoad / before.reserveOnLoad).toBeCloseTo(1, 4);
+            expect(after.kr / before.kr).toBeCloseTo(1, 4);
+            expect(
+              Math.abs((after.limitingHeightMm ?? 0) - (before.limitingHeightMm ?? 0)),
+            ).toBeLessThan(1e-3);
+          }),
+      ),
+      RUNS,
+    );
+  });
+
   it('becomes the plate’s K in a large cylinder', () => {
     fc.assert(
       fc.property(sound, (v) =>

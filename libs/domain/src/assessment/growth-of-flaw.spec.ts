@@ -118,4 +118,12 @@ describe('the growing flaw', () => {
     const near = assess({ kind: 'embedded', height: 6, ligament: 1.4, bending: -60 });
     expect(far.kPrimaryMPaSqrtM).toBeCloseTo(near.kPrimaryMPaSqrtM, 8);
   });
+
+  it('lets pressure reach the faces of an embedded flaw only when it opens to the bore', () => {
+    const flaw = (ligament: number, facePressure: number) =>
+      assess({ kind: 'embedded', height: 6, ligament, facePressure }).kPrimaryMPaSqrtM;
+    expect(flaw(10, 20)).toBe(flaw(10, 0));
+    expect(flaw(1.4, 20)).toBeGreaterThan(flaw(1.4, 0));
+    expect(flaw(17.6, 20)).toBe(flaw(17.6, 0));
+  });
 });

@@ -28,7 +28,11 @@ export function sectionOf(
   { kind, face, a: startA, ligament: startLigament }: CharacterisedFlaw,
 ): Section {
   const turned = face === flaw.situation.face ? flaw : turnedOver(flaw);
-  const placed: FlawCase = { ...turned, situation: { ...turned.situation, kind, face } };
+  const placed: FlawCase = {
+    ...turned,
+    situation: { ...turned.situation, kind, face },
+    facePressure: pressureOnFaces(flaw, kind, face),
+  };
   const evaluator = new SectionEvaluator(placed);
   const { stressIntensity, referenceStress } = evaluator.solutions;
   const limits = [...stressIntensity.limits, ...referenceStress.limits];
@@ -52,6 +56,13 @@ export function sectionOf(
       kind === 'surface' ? thickness - a : Math.min(toFace(a), thickness - a - centre),
     nearestFace: (a) => (toFace(a) <= thickness - a - centre ? face : OTHER_FACE[face]),
   };
+}
+
+/** The medium reaches an embedded flaw once it breaks through to the bore, and not through the outside. */
+function pressureOnFaces(flaw: FlawCase, kind: Section['kind'], face: Section['face']): number {
+  const breaksOutside =
+    flaw.situation.kind === 'embedded' && kind === 'surface' && face === 'outside';
+  return breaksOutside ? 0 : flaw.facePressure;
 }
 
 // seen from the other face, what was tension by bending is compression
