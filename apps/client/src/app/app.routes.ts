@@ -4,6 +4,7 @@ import { signedInGuard } from './core/session/signed-in-guard';
 /** Pages behind the sign-in, one lazy feature a line. */
 const pages: Routes = [
   { path: '', pathMatch: 'full', redirectTo: 'today' },
+  { path: 'flaws', loadChildren: () => import('./features/flaws/flaws.routes') },
   { path: 'history', loadChildren: () => import('./features/history/history.routes') },
   { path: 'people', loadChildren: () => import('./features/people/people.routes') },
   { path: 'site-rules', loadChildren: () => import('./features/site-rules/site-rules.routes') },
