@@ -60,7 +60,9 @@ const rowOf = (view: ImportView, row: number): ImportRow => {
 const levels = (row: ImportRow) => row.problems.map(({ level, field }) => `${level} ${field}`);
 /** The component's tag stands in the file; another reactor of the same kind needs its own. */
 const forTag = (bytes: Buffer, tag: string) =>
-  Buffer.from(bytes.toString('utf8').replaceAll('R-401', tag));
+  Buffer.from(
+    bytes.toString('utf8').replaceAll('R-401', tag).replaceAll('R 401', tag.replace('-', ' ')),
+  );
 
 describe('the import of an inspector’s file', () => {
   it('reads a file, tells two bad rows by row and column, and commits once they are fixed', async () => {

@@ -48,7 +48,7 @@ export async function start(env: Readonly<Record<string, string | undefined>>): 
     closers.unshift(() => mail.close());
     const jobs = startJobs(deps, mail.mailer);
     closers.unshift(() => jobs.close());
-    const { app } = createApp(deps, resolve(ROOT, 'dist/client'));
+    const { app } = createApp({ ...deps, mailer: mail.mailer }, resolve(ROOT, 'dist/client'));
     const server = await listen(app, config.host, config.port);
     closers.unshift(() => drain(server, GRACE_SECONDS));
     announce(config, portOf(server), setUpToken);

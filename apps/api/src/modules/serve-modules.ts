@@ -16,6 +16,11 @@ import { serveDocuments } from './documents/documents.routes';
 import { serveFindings } from './findings/findings.routes';
 import { serveImports } from './imports/imports.routes';
 import { serveInspections } from './inspections/inspections.routes';
+import { serveMails } from './mails/mails.routes';
+import { serveReinspections } from './reinspections/reinspections.routes';
+import { serveReminders } from './reminders/reminders.routes';
+import { serveShutdownWindows } from './shutdown-windows/shutdown-windows.routes';
+import { serveToday } from './today/today.routes';
 
 /** Every module's routes, in one list. */
 export function serveModules(api: Api, deps: Deps): void {
@@ -35,4 +40,9 @@ export function serveModules(api: Api, deps: Deps): void {
   serveDocuments(api, deps);
   serveImports(api, deps);
   serveFindings(api, deps);
+  serveReinspections(api, deps);
+  serveShutdownWindows(api, deps);
+  serveReminders(api, deps);
+  serveMails(api, deps);
+  serveToday(api, deps);
 }

@@ -139,13 +139,13 @@ export const flawRepository = (db: Database) => ({
         circumferentialMm: flaws.circumferentialMm,
         heightMm: sql<
           number | null
-        >`(select n.height_mm from findings n where n.flaw_id = ${flaws.id} order by n.inspected_on desc limit 1)`,
+        >`(select n.height_mm from findings n where n.flaw_id = flaws.id order by n.inspected_on desc limit 1)`,
         lengthMm: sql<
           number | null
-        >`(select n.length_mm from findings n where n.flaw_id = ${flaws.id} order by n.inspected_on desc limit 1)`,
+        >`(select n.length_mm from findings n where n.flaw_id = flaws.id order by n.inspected_on desc limit 1)`,
         inspectedOn: sql<
           string | null
-        >`(select max(n.inspected_on)::text from findings n where n.flaw_id = ${flaws.id})`,
+        >`(select max(n.inspected_on)::text from findings n where n.flaw_id = flaws.id)`,
       })
       .from(flaws)
       .where(and(eq(flaws.locationId, locationId), notInArray(flaws.state, ['removed', 'closed']))),

@@ -12,6 +12,34 @@ export const reinspectionRepository = (db: Database) => ({
     return row;
   },
 
+  async byId(siteId: string, id: string): Promise<ReinspectionRecord | undefined> {
+    const [row] = await db
+      .select()
+      .from(reinspections)
+      .where(and(eq(reinspections.siteId, siteId), eq(reinspections.id, id)));
+    return row;
+  },
+
+  /** Changes the plan of a task that is still open or planned, at the version seen. */
+  async plan(
+    id: string,
+    seen: number,
+    values: Partial<typeof reinspections.$inferInsert>,
+  ): Promise<ReinspectionRecord | undefined> {
+    const [row] = await db
+      .update(reinspections)
+      .set({ ...values, version: sql`${reinspections.version} + 1` })
+      .where(
+        and(
+          eq(reinspections.id, id),
+          eq(reinspections.version, seen),
+          inArray(reinspections.state, ['open', 'planned']),
+        ),
+      )
+      .returning();
+    return row;
+  },
+
   async openOfFlaw(flawId: string): Promise<ReinspectionRecord | undefined> {
     const [row] = await db
       .select()
