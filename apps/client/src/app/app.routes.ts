@@ -5,6 +5,10 @@ import { signedInGuard } from './core/session/signed-in-guard';
 const pages: Routes = [
   { path: '', pathMatch: 'full', redirectTo: 'today' },
   { path: 'flaws', loadChildren: () => import('./features/flaws/flaws.routes') },
+  {
+    path: 'assessments',
+    loadChildren: () => import('./features/assessments/assessments.routes'),
+  },
   { path: 'history', loadChildren: () => import('./features/history/history.routes') },
   { path: 'people', loadChildren: () => import('./features/people/people.routes') },
   { path: 'site-rules', loadChildren: () => import('./features/site-rules/site-rules.routes') },

@@ -1,0 +1,64 @@
+import { ChangeDetectionStrategy, Component, computed, input, output } from '@angular/core';
+import type { AssessmentInput } from '@ligament/domain/assessment/assessment-input';
+import type { GrowthLawView } from '@ligament/domain/contract/growth-laws';
+import type { Given } from '@ligament/domain/units/provenance';
+import { inputName } from '../../shared/assessed/input-names';
+import { choose, given, include, setAt, valueAt } from './edit-input';
+import { GivenField } from './given-field';
+import { GrowthFields } from './growth-fields';
+import { type InputField, inputGroups, type Option } from './input-groups';
+
+/** Every input of an assessment, in groups, each with its origin; to edit or to read. */
+@Component({
+  selector: 'app-inputs-panel',
+  imports: [GivenField, GrowthFields],
+  templateUrl: './inputs-panel.html',
+  styleUrl: './inputs-panel.scss',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
+export class InputsPanel {
+  readonly input = input.required<AssessmentInput>();
+  readonly register = input<AssessmentInput | null>(null);
+  readonly laws = input<readonly GrowthLawView[]>([]);
+  readonly readOnly = input(false);
+  /** What is wrong, by the path of the input. */
+  readonly messages = input<ReadonlyMap<string, string>>(new Map());
+  readonly changed = output<AssessmentInput>();
+
+  protected readonly groups = computed(() => inputGroups(this.input()));
+  protected readonly name = (path: string) => inputName(path).name;
+
+  protected givenAt(path: string): Given | null {
+    return given(valueAt(this.input(), path));
+  }
+
+  protected registerAt(path: string): Given | null {
+    const register = this.register();
+    return register ? given(valueAt(register, path)) : null;
+  }
+
+  protected wordAt(path: string): string {
+    return String(valueAt(this.input(), path));
+  }
+
+  protected wordsOf({ path }: InputField, options: readonly Option[]): string {
+    const word = this.wordAt(path);
+    return options.find(({ value }) => value === word)?.words ?? word;
+  }
+
+  protected isOn(path: string): boolean {
+    return valueAt(this.input(), path) === true;
+  }
+
+  protected set(path: string, value: unknown): void {
+    this.changed.emit(setAt(this.input(), path, value));
+  }
+
+  protected choose(path: string, word: string): void {
+    this.changed.emit(choose(this.input(), path, word, this.register()));
+  }
+
+  protected include(path: string, included: boolean): void {
+    this.changed.emit(include(this.input(), path, included, this.register()));
+  }
+}
