@@ -4,6 +4,7 @@ import { signedInGuard } from './core/session/signed-in-guard';
 /** Pages behind the sign-in, one lazy feature a line. */
 const pages: Routes = [
   { path: '', pathMatch: 'full', redirectTo: 'today' },
+  { path: 'inspections', loadChildren: () => import('./features/inspections/inspections.routes') },
   { path: 'flaws', loadChildren: () => import('./features/flaws/flaws.routes') },
   {
     path: 'assessments',
