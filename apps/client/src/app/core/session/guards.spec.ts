@@ -1,6 +1,6 @@
 import { provideHttpClient } from '@angular/common/http';
 import { HttpTestingController, provideHttpClientTesting } from '@angular/common/http/testing';
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter, Router } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
@@ -9,7 +9,11 @@ import { actionGuard } from './action-guard';
 import { Session } from './session';
 import { signedInGuard } from './signed-in-guard';
 
-@Component({ selector: 'app-page', template: '<h1>page</h1>' })
+@Component({
+  selector: 'app-page',
+  template: '<h1>page</h1>',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
 class Page {}
 
 describe('the guards of a page', () => {

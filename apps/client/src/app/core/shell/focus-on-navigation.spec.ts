@@ -1,14 +1,22 @@
 import { jest } from '@jest/globals';
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { provideRouter } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 import { FocusOnNavigation } from './focus-on-navigation';
 
-@Component({ selector: 'app-one', template: '<main><h1>One</h1></main>' })
+@Component({
+  selector: 'app-one',
+  template: '<main><h1>One</h1></main>',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
 class One {}
 
-@Component({ selector: 'app-two', template: '<main><h1>Two</h1></main>' })
+@Component({
+  selector: 'app-two',
+  template: '<main><h1>Two</h1></main>',
+  changeDetection: ChangeDetectionStrategy.OnPush,
+})
 class Two {}
 
 const soon = () => new Promise((resolve) => setTimeout(resolve, 5));

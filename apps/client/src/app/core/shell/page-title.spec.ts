@@ -1,11 +1,11 @@
-import { Component } from '@angular/core';
+import { ChangeDetectionStrategy, Component } from '@angular/core';
 import { TestBed } from '@angular/core/testing';
 import { Title } from '@angular/platform-browser';
 import { provideRouter, TitleStrategy } from '@angular/router';
 import { RouterTestingHarness } from '@angular/router/testing';
 import { PageTitle } from './page-title';
 
-@Component({ selector: 'app-page', template: '' })
+@Component({ selector: 'app-page', template: '', changeDetection: ChangeDetectionStrategy.OnPush })
 class Page {}
 
 describe('PageTitle', () => {

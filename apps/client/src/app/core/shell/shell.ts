@@ -25,6 +25,7 @@ import { THEMES, ThemeChoice } from './theme';
   ],
   templateUrl: './shell.html',
   styleUrl: './shell.scss',
+  host: { '(document:keydown.escape)': 'railOpen.set(false)' },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class Shell {
