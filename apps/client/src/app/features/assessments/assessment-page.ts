@@ -14,10 +14,13 @@ import { RouterLink } from '@angular/router';
 import type { AssessmentView } from '@ligament/domain/contract/assessments';
 import { catchError, distinctUntilChanged, map, of, switchMap } from 'rxjs';
 import { Session } from '../../core/session/session';
+import { AssessedDrawings } from '../../shared/assessed/assessed-drawings';
+import { figuresOf } from '../../shared/assessed/figures-of';
 import type { LifeSurroundings } from '../../shared/assessed/life-of';
 import { RefusalNotice } from '../../shared/assessed/refusal-notice';
 import { verdictSentence } from '../../shared/assessed/verdict-words';
 import { Chip } from '../../shared/chips/chip';
+import { FigureStrip } from '../../shared/figure-strip/figure-strip';
 import { DayPipe } from '../../shared/format/day-pipe';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { ChangedMeanwhile } from '../../shared/problem/changed-meanwhile';
@@ -52,6 +55,8 @@ import { SignaturesPanel } from './signatures-panel';
     ChangedMeanwhile,
     FieldError,
     RefusalNotice,
+    FigureStrip,
+    AssessedDrawings,
     InputsPanel,
     ResultsPanel,
     DueDatePanel,
@@ -113,6 +118,10 @@ export class AssessmentPage implements HasUnsaved {
   protected readonly verdict = computed(() => {
     const each = this.desk.assessed();
     return each ? verdictSentence(each.outcome.verdict, each.dueOn) : '';
+  });
+  protected readonly figures = computed(() => {
+    const each = this.desk.assessed();
+    return each ? figuresOf(each) : [];
   });
   protected readonly refused = computed(() => {
     const outcome = this.desk.outcome();

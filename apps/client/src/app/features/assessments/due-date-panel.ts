@@ -4,14 +4,14 @@ import { ReactiveFormsModule } from '@angular/forms';
 import type { ReinspectionProposalView } from '@ligament/domain/contract/assessments';
 import { judgeChosenDate } from '@ligament/domain/scheduling/judge-chosen-date';
 import { map, startWith, switchMap } from 'rxjs';
-import { DayPipe } from '../../shared/format/day-pipe';
+import { DayPipe, DaysPipe } from '../../shared/format/day-pipe';
 import { FieldError } from '../../shared/validation/field-error';
 import type { ConclusionForm } from './conclusion-form';
 
 /** By when somebody must look again: every candidate, the one that governs, and the engineer's choice. */
 @Component({
   selector: 'app-due-date-panel',
-  imports: [ReactiveFormsModule, DayPipe, FieldError],
+  imports: [ReactiveFormsModule, DayPipe, DaysPipe, FieldError],
   templateUrl: './due-date-panel.html',
   styleUrl: './due-date-panel.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,

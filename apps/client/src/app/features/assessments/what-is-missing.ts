@@ -2,7 +2,7 @@ import type { AssessmentInput } from '@ligament/domain/assessment/assessment-inp
 import type { AssessmentOutcome } from '@ligament/domain/assessment/assessment-outcome';
 import type { ReinspectionProposalView } from '@ligament/domain/contract/assessments';
 import { judgeChosenDate } from '@ligament/domain/scheduling/judge-chosen-date';
-import { inputName } from '../../shared/assessed/input-names';
+import { inputName, withinSentence } from '../../shared/assessed/input-names';
 import { unexplainedPaths } from './overrides';
 
 export interface Unfinished {
@@ -28,7 +28,7 @@ export function whatIsMissing(each: Unfinished): readonly string[] {
       : null,
     unexplained.length > 0
       ? `Say in the note why these differ from the register: ${unexplained
-          .map((path) => inputName(path).name.toLowerCase())
+          .map((path) => withinSentence(inputName(path).name))
           .join(', ')}.`
       : null,
     wrongDate(each),

@@ -7,7 +7,7 @@ import { catchError, of, switchMap } from 'rxjs';
 import { type Loadable, loadable, LOADING, valueOf } from '../../core/http/loadable';
 import { Session } from '../../core/session/session';
 import { Chip } from '../../shared/chips/chip';
-import { DayPipe } from '../../shared/format/day-pipe';
+import { DayPipe, DaysPipe } from '../../shared/format/day-pipe';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { FailedState } from '../../shared/states/failed-state';
 import { LoadingState } from '../../shared/states/loading-state';
@@ -29,6 +29,7 @@ import { StartAssessment } from './start-assessment';
     FailedState,
     LoadingState,
     DayPipe,
+    DaysPipe,
     FlawStanding,
     FindingsTable,
     AssessmentsTable,

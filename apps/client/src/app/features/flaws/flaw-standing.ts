@@ -10,13 +10,13 @@ import { verdictSentence } from '../../shared/assessed/verdict-words';
 import { Caution } from '../../shared/caution/caution';
 import type { NamedSpan } from '../../shared/drawings/life-drawing';
 import { FigureStrip } from '../../shared/figure-strip/figure-strip';
-import { DayPipe } from '../../shared/format/day-pipe';
+import { DayPipe, DaysPipe } from '../../shared/format/day-pipe';
 import { basisOf, caseOf, type ShownAssessment } from './shown-assessment';
 
 /** The answer above the fold: acceptable or not, until when, why; and how sure that answer is. */
 @Component({
   selector: 'app-flaw-standing',
-  imports: [RouterLink, FigureStrip, AssessedDrawings, RefusalNotice, Caution, DayPipe],
+  imports: [RouterLink, FigureStrip, AssessedDrawings, RefusalNotice, Caution, DayPipe, DaysPipe],
   templateUrl: './flaw-standing.html',
   styleUrl: './flaw-standing.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -44,7 +44,10 @@ export class FlawStanding {
     const verdict = this.assessed()?.outcome.verdict;
     return verdict === 'not acceptable' ? 'bad' : verdict === 'near the limit' ? 'warn' : 'good';
   });
-  protected readonly assumed = computed(() => assumedNames(this.assessed()?.outcome.assumed ?? []));
+  protected readonly assumed = computed(() => {
+    const each = this.assessed();
+    return each ? assumedNames(each.input, each.outcome.assumed) : [];
+  });
   protected readonly proposal = computed(() => {
     const { proposal } = this.shown();
     return proposal?.status === 'proposed' ? proposal : null;

@@ -57,7 +57,12 @@ import { sectionOf } from './section-of';
       min-width: 0;
       margin: 0;
     }
-    @container (min-width: 860px) {
+    @container (min-width: 620px) {
+      .pair {
+        grid-template-columns: minmax(0, 1.2fr) minmax(0, 1fr);
+      }
+    }
+    @container (min-width: 900px) {
       .pair {
         grid-template-columns: minmax(0, 1.75fr) minmax(0, 1fr);
       }

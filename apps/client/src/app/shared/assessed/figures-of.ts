@@ -20,26 +20,30 @@ export function figuresOf(each: AssessedCase): Figure[] {
       value: numberText(flaw.heightMm.value),
       ...error(sizingError?.heightMm),
       unit: 'mm',
+      note: `assessed at ${numberText(surface ? outcome.assessed.aMm : 2 * outcome.assessed.aMm)} mm`,
     },
     {
       label: 'Length 2c',
       value: numberText(flaw.lengthMm.value),
       ...error(sizingError?.lengthMm),
       unit: 'mm',
+      note: `assessed at ${numberText(2 * outcome.assessed.cMm)} mm`,
     },
     {
       label: 'Load to reach the limit',
       value: numberText(outcome.reserveOnLoad, 2),
       unit: '× governing load',
+      note: 'below 1: outside the diagram',
       ...(tone ? { tone } : {}),
     },
     {
       label: surface ? 'Limiting depth' : 'Limiting height',
       value: outcome.limitingHeightMm === null ? 'none' : numberText(outcome.limitingHeightMm),
-      unit:
+      unit: outcome.limitingHeightMm === null ? '' : 'mm',
+      note:
         outcome.limitingHeightMm === null
           ? 'inside the method’s range'
-          : `mm at 2c = ${numberText(2 * outcome.assessed.cMm)} mm`,
+          : `at 2c = ${numberText(2 * outcome.assessed.cMm)} mm`,
     },
     lifeFigure(each),
   ];
@@ -51,11 +55,13 @@ const error = (mm: number | undefined) =>
 function lifeFigure({ input, outcome }: AssessedCase): Figure {
   const assessed = lifeWords(outcome.life);
   const measured = outcome.life.end === 'limit reached' ? lifeAtMeasuredSize(input) : null;
-  const side = measured ? ` · ${lifeWords(measured).value} at the size measured` : '';
   return {
     label: 'Remaining life',
     value: assessed.value,
-    unit: `${assessed.unit}${side}`,
-    ...(outcome.life.years === null ? { tone: 'bad' as const } : {}),
+    unit: assessed.unit,
+    note: measured
+      ? `${lifeWords(measured).value} at the size measured`
+      : 'from the inspection, upper growth law',
+    ...(outcome.life.years === null ? { tone: 'bad' as const, note: 'not acceptable now' } : {}),
   };
 }

@@ -1,3 +1,5 @@
+import type { AssessmentInput } from '@ligament/domain/assessment/assessment-input';
+
 /** Name and unit of every input, by its path; places of a list stand as `*`. */
 const NAMES: Readonly<Record<string, readonly [name: string, unit: string]>> = {
   'wall.shape': ['Wall taken as', ''],
@@ -52,6 +54,24 @@ export function inputName(path: string): InputName {
   return { name: places.length > 0 ? `${name}, ${places.join(', ')}` : name, unit };
 }
 
-/** Names of the inputs that are only assumed, for the caution beside a verdict. */
-export const assumedNames = (paths: readonly string[]): string[] =>
-  paths.map((path) => inputName(path).name.toLowerCase());
+/** Inputs that rest on an assumption or a standard's default, in words, for the caution beside a verdict. */
+export function assumedNames(input: AssessmentInput, paths: readonly string[]): string[] {
+  return paths.map((path) => {
+    const name = withinSentence(inputName(path).name);
+    return provenanceAt(input, path) === 'standard default' ? `${name} (standard default)` : name;
+  });
+}
+
+/** A name inside a sentence: its first letter is small unless it belongs to a person. */
+export const withinSentence = (name: string): string =>
+  /^(Young|Poisson)/.test(name) ? name : name.charAt(0).toLowerCase() + name.slice(1);
+
+function provenanceAt(input: AssessmentInput, path: string): unknown {
+  const member = path
+    .split('.')
+    .reduce<unknown>((data, name) => (isRecord(data) ? data[name] : undefined), input);
+  return isRecord(member) ? member['provenance'] : undefined;
+}
+
+const isRecord = (data: unknown): data is Readonly<Record<string, unknown>> =>
+  typeof data === 'object' && data !== null;

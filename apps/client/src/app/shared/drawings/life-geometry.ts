@@ -34,8 +34,8 @@ export interface LifeGeometry {
   readonly goesOn: boolean;
 }
 
-const HEIGHT = 252;
-const MARGIN = { left: 52, right: 16, top: 52, bottom: 30 };
+const HEIGHT = 264;
+const MARGIN = { left: 52, right: 16, top: 64, bottom: 30 };
 /** A life longer than this after the last inspection is not drawn to its end: the next years would be squeezed. */
 const LONGEST_AHEAD_DAYS = 20 * 365.25;
 const YEAR = 365.25;

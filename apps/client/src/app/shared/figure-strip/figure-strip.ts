@@ -7,6 +7,8 @@ export interface Figure {
   readonly unit?: string;
   /** Uncertainty or side remark, e.g. `± 0.7`. */
   readonly beside?: string;
+  /** A second line: what the figure holds for, or hangs on. */
+  readonly note?: string;
   readonly tone?: 'good' | 'warn' | 'bad';
 }
 
@@ -25,6 +27,9 @@ export interface Figure {
             }
             @if (figure.unit; as unit) {
               <span> {{ unit }}</span>
+            }
+            @if (figure.note; as note) {
+              <small>{{ note }}</small>
             }
           </dd>
         </div>
@@ -66,6 +71,11 @@ export interface Figure {
       color: var(--ink-2);
       font-size: 12px;
       white-space: nowrap;
+    }
+    small {
+      display: block;
+      color: var(--ink-2);
+      font-size: 12px;
     }
   `,
   changeDetection: ChangeDetectionStrategy.OnPush,

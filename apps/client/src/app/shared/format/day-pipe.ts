@@ -1,5 +1,6 @@
 import { Pipe, type PipeTransform } from '@angular/core';
 import { dayText, momentText } from './day-text';
+import { daysInWords } from './days-in-words';
 
 /** A calendar date (2026-11-10) as 10 Nov 2026. */
 @Pipe({ name: 'day' })
@@ -14,5 +15,13 @@ export class DayPipe implements PipeTransform {
 export class MomentPipe implements PipeTransform {
   transform(instant: string | null | undefined, timeZone = 'UTC'): string {
     return momentText(instant, timeZone);
+  }
+}
+
+/** A sentence with its calendar dates as a reader writes them. */
+@Pipe({ name: 'days' })
+export class DaysPipe implements PipeTransform {
+  transform(sentence: string): string {
+    return daysInWords(sentence);
   }
 }
