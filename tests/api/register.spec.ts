@@ -215,6 +215,50 @@ describe('the register', () => {
     expect(foreign.status).toBe(422);
   });
 
+  it('adds a table of components as a whole, and tells what is wrong by row and column', async () => {
+    const engineer = as(plant.app, plant.engineer);
+    const { unitId, materialId } = await makeParts();
+    const units = await engineer.get('/api/units');
+    const unit = units.body.rows.find((each: { id: string }) => each.id === unitId).code as string;
+    const material = (await engineer.get(`/api/materials/${materialId}`)).body.name as string;
+    const header =
+      'tag,description,unit,kind,inside_diameter_mm,wall_mm,design_pressure_mpa,design_temperature_c,operating_pressure_mpa,operating_temperature_c,material,heat_treatment,mechanism,commissioned_on';
+    const row = (tag: string, wall = '20', kind = 'vessel shell') =>
+      `${tag},Drum,${unit},${kind},1800,${wall},1.4,110,1.2,95,${material},as-welded,fatigue,2006-04-24`;
+    const send = (lines: string[]) =>
+      engineer
+        .post('/api/register-imports')
+        .attach('file', Buffer.from([header, ...lines].join('\n')), 'register.csv');
+    const bad = await send([row('T-1'), row('T-2', 'thick'), row('T-3', '20', 'tank'), row('T-1')]);
+    expect(bad.body.rows.map((each: { state: string }) => each.state)).toEqual([
+      'new',
+      'cannot be taken',
+      'cannot be taken',
+      'cannot be taken',
+    ]);
+    expect(bad.body.rows[1].problems[0]).toMatchObject({
+      row: 3,
+      column: 'wall_mm',
+      original: 'thick',
+    });
+    expect(bad.body.rows[2].problems[0].message).toContain('Use one of: vessel shell');
+    const refused = await engineer
+      .post('/api/register-imports/commit')
+      .send({ fileName: 'register.csv', csv: bad.body.csv });
+    expect(refused.status).toBe(422);
+    expect((await engineer.get('/api/components?search=T-1')).body.rows).toEqual([]);
+    const good = await send([row('T-1'), row('T-2')]);
+    const added = await engineer
+      .post('/api/register-imports/commit')
+      .send({ fileName: 'register.csv', csv: good.body.csv });
+    expect([added.status, added.body.added]).toEqual([201, ['T-1', 'T-2']]);
+    const again = await send([row('T-1'), row('T-4')]);
+    expect(again.body.rows.map((each: { state: string }) => each.state)).toEqual([
+      'already in the register',
+      'new',
+    ]);
+  });
+
   it('lets only engineers and administrators write', async () => {
     const parts = await makeParts();
     for (const person of [plant.inspector, plant.planner, plant.operations, plant.auditor]) {

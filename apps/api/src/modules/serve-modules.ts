@@ -21,6 +21,7 @@ import { serveReinspections } from './reinspections/reinspections.routes';
 import { serveReminders } from './reminders/reminders.routes';
 import { serveShutdownWindows } from './shutdown-windows/shutdown-windows.routes';
 import { serveToday } from './today/today.routes';
+import { serveRegisterImports } from './register-imports/register-imports.routes';
 
 /** Every module's routes, in one list. */
 export function serveModules(api: Api, deps: Deps): void {
@@ -33,6 +34,7 @@ export function serveModules(api: Api, deps: Deps): void {
   serveMaterials(api, deps);
   serveGrowthLaws(api, deps);
   serveComponents(api, deps);
+  serveRegisterImports(api, deps);
   serveSearch(api, deps);
   serveFlaws(api, deps);
   serveAssessments(api, deps);

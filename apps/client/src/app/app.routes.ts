@@ -5,6 +5,7 @@ import { signedInGuard } from './core/session/signed-in-guard';
 const pages: Routes = [
   { path: '', pathMatch: 'full', redirectTo: 'today' },
   { path: 'inspections', loadChildren: () => import('./features/inspections/inspections.routes') },
+  { path: 'register', loadChildren: () => import('./features/register/register.routes') },
   { path: 'flaws', loadChildren: () => import('./features/flaws/flaws.routes') },
   {
     path: 'assessments',
@@ -13,6 +14,11 @@ const pages: Routes = [
   { path: 'today', loadChildren: () => import('./features/today/today.routes') },
   { path: 'schedule', loadChildren: () => import('./features/schedule/schedule.routes') },
   { path: 'mailbox', loadChildren: () => import('./features/mailbox/mailbox.routes') },
+  {
+    path: 'register-import',
+    loadChildren: () => import('./features/register-import/register-import.routes'),
+  },
+  { path: 'checks', loadChildren: () => import('./features/checks/checks.routes') },
   { path: 'history', loadChildren: () => import('./features/history/history.routes') },
   { path: 'people', loadChildren: () => import('./features/people/people.routes') },
   { path: 'site-rules', loadChildren: () => import('./features/site-rules/site-rules.routes') },
