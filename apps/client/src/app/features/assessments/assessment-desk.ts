@@ -128,7 +128,8 @@ export class AssessmentDesk {
     return this.written().chosenDueOn || proposal.dueOn;
   });
   readonly assessed = computed((): AssessedCase | null => {
-    const [view, input, outcome] = [this.recorded(), this.input(), this.outcome()];
+    const [view, outcome] = [this.recorded(), this.outcome()];
+    const input = (this.editable() ? this.live()?.input : null) ?? view?.input;
     if (!view || !input || outcome?.status !== 'assessed') return null;
     const { heightErrorMm: heightMm, lengthErrorMm: lengthMm } = view.finding;
     return {

@@ -12,6 +12,7 @@ import { ReactiveFormsModule } from '@angular/forms';
 import { MatButtonModule } from '@angular/material/button';
 import { RouterLink } from '@angular/router';
 import type { AssessmentView } from '@ligament/domain/contract/assessments';
+import { canonicalJson } from '@ligament/domain/records/canonical-json';
 import { catchError, distinctUntilChanged, map, of, switchMap } from 'rxjs';
 import { Session } from '../../core/session/session';
 import { AssessedDrawings } from '../../shared/assessed/assessed-drawings';
@@ -148,12 +149,12 @@ export class AssessmentPage implements HasUnsaved {
   }
 
   protected told({ input, conclusion, chosenDueOn, chosenReason }: AssessmentView) {
-    return { ...input, conclusion, chosenDueOn, chosenReason };
+    return { ...ordered(input), conclusion, chosenDueOn, chosenReason };
   }
 
   protected mine() {
     const { conclusion, chosenDueOn, chosenReason } = this.desk.body();
-    return { ...this.desk.input(), conclusion, chosenDueOn, chosenReason };
+    return { ...ordered(this.desk.input()), conclusion, chosenDueOn, chosenReason };
   }
 
   protected print(): void {
@@ -164,3 +165,7 @@ export class AssessmentPage implements HasUnsaved {
     if (this.hasUnsaved()) event.preventDefault();
   }
 }
+
+/** The same members in one order, so that only values differ. */
+const ordered = (input: unknown) =>
+  JSON.parse(canonicalJson(input)) as Readonly<Record<string, unknown>>;

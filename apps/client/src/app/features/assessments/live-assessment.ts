@@ -8,6 +8,8 @@ import { proposeReinspection } from '@ligament/domain/scheduling/propose-reinspe
 
 /** What the browser computes while an engineer thinks: the very engine that the server records with. */
 export interface LiveAssessment {
+  /** What it was computed from; what is typed may already be further. */
+  readonly input: AssessmentInput;
   /** Null while an input is missing or cannot be a value at all. */
   readonly outcome: AssessmentOutcome | null;
   readonly proposal: ReinspectionProposalView | null;
@@ -30,19 +32,19 @@ export function assessLive({ input, inspectedOn, mechanism, rules }: LiveSubject
       ({ path, message }) =>
         [path.join('.').replace(/\.(value|note|provenance)$/, ''), message] as const,
     );
-    return { outcome: null, proposal: null, messages: new Map([...messages].reverse()) };
+    return { input, outcome: null, proposal: null, messages: new Map([...messages].reverse()) };
   }
   const outcome = assessFlaw(read.data);
   if (outcome.status === 'refused') {
     const messages = outcome.refusals.map(
       ({ input: path, limit, message }) => [path, `${message} (limit: ${limit})`] as const,
     );
-    return { outcome, proposal: null, messages: new Map(messages) };
+    return { input, outcome, proposal: null, messages: new Map(messages) };
   }
   const proposal = rules
     ? proposeReinspection({ inspectedOn, life: outcome.life, mechanism, policy: rules })
     : null;
-  return { outcome, proposal: proposal && copyOf(proposal), messages: new Map() };
+  return { input, outcome, proposal: proposal && copyOf(proposal), messages: new Map() };
 }
 
 /** The proposal as it travels. */

@@ -36,12 +36,17 @@ export class FlawStanding {
     const each = this.assessed();
     return each ? figuresOf(each) : [];
   });
+  /** Only what is signed gives a date. */
   protected readonly sentence = computed(() => {
     const each = this.assessed();
-    return each ? verdictSentence(each.outcome.verdict, each.dueOn) : '';
+    if (!each) return '';
+    return this.shown().standing === 'approved'
+      ? verdictSentence(each.outcome.verdict, each.dueOn)
+      : `Not signed yet: ${each.outcome.verdict} as computed.`;
   });
   protected readonly tone = computed(() => {
     const verdict = this.assessed()?.outcome.verdict;
+    if (this.shown().standing !== 'approved' && verdict !== 'not acceptable') return 'unsigned';
     return verdict === 'not acceptable' ? 'bad' : verdict === 'near the limit' ? 'warn' : 'good';
   });
   protected readonly assumed = computed(() => {

@@ -98,10 +98,15 @@ function dueOf({ reinspection }: FlawView, { standing, proposal, chosenDueOn }: 
   return chosenDueOn ?? (proposal?.status === 'proposed' ? proposal.dueOn : null);
 }
 
-/** The rule that sets the date, in a few words. */
-export function basisOf({ proposal, chosenDueOn }: ShownAssessment): string {
+/** Where the date comes from, in a few words. */
+export function basisOf({ standing, proposal, chosenDueOn }: ShownAssessment): string {
   if (proposal?.status !== 'proposed') return '';
-  if (chosenDueOn && chosenDueOn !== proposal.dueOn) return 'chosen by the engineer';
   const rule = proposal.candidates.find(({ governs }) => governs)?.rule ?? '';
-  return rule === 'fraction of life' ? 'share of the remaining life' : rule;
+  const chosen = chosenDueOn !== null && chosenDueOn !== proposal.dueOn;
+  const basis = chosen
+    ? 'chosen by the engineer'
+    : rule === 'fraction of life'
+      ? 'share of the remaining life'
+      : rule;
+  return standing === 'approved' ? basis : `proposed, not signed: ${basis}`;
 }

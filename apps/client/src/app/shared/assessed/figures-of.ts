@@ -33,7 +33,7 @@ export function figuresOf(each: AssessedCase): Figure[] {
       label: 'Load to reach the limit',
       value: numberText(outcome.reserveOnLoad, 2),
       unit: '× governing load',
-      note: 'below 1: outside the diagram',
+      note: 'must stay above 1',
       ...(tone ? { tone } : {}),
     },
     {

@@ -82,10 +82,32 @@ describe('sectionGeometry', () => {
     expect(sectionGeometry(drawing(), 360).labels).toEqual([]);
   });
 
+  it('leads each label to its own outline, on whichever face the flaw is', () => {
+    const outside = sectionGeometry(
+      drawing({
+        measured: surface(5, 30, 'outside'),
+        assessed: surface(6, 32, 'outside'),
+        expected: null,
+        limiting: surface(14, 50, 'outside'),
+      }),
+      900,
+    );
+    const lowest = outside.wall.top + 14 * outside.scale;
+    for (const { fromY } of outside.labels) {
+      expect(fromY).toBeGreaterThanOrEqual(outside.wall.top);
+      expect(fromY).toBeLessThanOrEqual(lowest);
+    }
+  });
+
+  it('draws a limit that is already passed on top of the flaw', () => {
+    const passed = sectionGeometry(drawing({ expected: null, limiting: surface(4, 76) }), 900);
+    expect(passed.outlines.map(({ part }) => part)).toEqual(['assessed', 'measured', 'limiting']);
+  });
+
   it('cuts a very long flaw rather than drawing a wall too thin to see', () => {
     const long = sectionGeometry(drawing({ measured: surface(7.6, 900), limiting: null }), 700);
     expect(long.cut).toBe(true);
-    expect(long.wall.bottom - long.wall.top).toBeGreaterThanOrEqual(84);
+    expect(long.wall.bottom - long.wall.top).toBeGreaterThanOrEqual(63.9);
     expect(sectionGeometry(drawing(), 900).cut).toBe(false);
   });
 

@@ -1,24 +1,13 @@
 import { type Box } from './place-labels';
 import type { NamedOutline, Outline, SectionDrawing } from './section-drawing';
 import { roundStep } from './axis-ticks';
-import { spreadLabels } from './spread-labels';
-
-/** The part an outline plays in the drawing. */
-export type Part = 'limiting' | 'expected' | 'assessed' | 'measured';
+import { type Frame, yOf } from './section-frame';
+import { leaderLabels, type LeaderLabel, type Part } from './section-leaders';
 
 export interface DrawnOutline {
   readonly part: Part;
   readonly path: string;
   readonly label: string;
-}
-
-export interface LeaderLabel {
-  readonly part: Part;
-  readonly text: string;
-  readonly fromX: number;
-  readonly fromY: number;
-  readonly x: number;
-  readonly y: number;
 }
 
 export interface Dimension {
@@ -49,21 +38,19 @@ export interface SectionGeometry {
 }
 
 const TALLEST_WALL = 290;
-/** A wall drawn thinner than this shows nothing; a very long flaw is cut instead. */
-const THINNEST_WALL = 84;
+/** A wall drawn thinner than this shows nothing: labels give way first, then a very long flaw is cut. */
+const THINNEST_WALL = 64;
 const LABEL_ROOM = 226;
 const WIDE = 600;
-const BAND = 40;
+const BAND = 44;
 
 export function sectionGeometry(drawing: SectionDrawing, width: number): SectionGeometry {
   const parts = partsOf(drawing);
-  const room = width >= WIDE ? width - LABEL_ROOM : width;
   const longest = Math.max(...parts.map(([, { lengthMm }]) => lengthMm));
-  const fitting = Math.min((room - 24) / longest, TALLEST_WALL / drawing.wallMm);
-  const scale = Math.max(fitting, THINNEST_WALL / drawing.wallMm);
-  const wallPx = drawing.wallMm * scale;
-  const wall = { left: 0, right: width, top: BAND, bottom: BAND + wallPx };
-  const frame: Frame = { scale, wall, middleX: room / 2, edge: room };
+  const { room, scale } = fit(longest, drawing.wallMm, width);
+  const labelled = room < width;
+  const wall = { left: 0, right: width, top: BAND, bottom: BAND + drawing.wallMm * scale };
+  const frame: Frame = { wallMm: drawing.wallMm, scale, wall, middleX: room / 2, edge: room };
   return {
     width,
     height: wall.bottom + BAND + 26,
@@ -75,7 +62,7 @@ export function sectionGeometry(drawing: SectionDrawing, width: number): Section
       path: outlinePath(outline, frame),
       label: outline.label,
     })),
-    labels: width >= WIDE ? leaderLabels(parts, frame) : [],
+    labels: labelled ? leaderLabels(parts, frame) : [],
     ligament: ligamentOf(drawing.assessed, drawing.wallMm, frame),
     length: lengthOf(drawing.measured, frame),
     scaleBar: scaleBarOf(drawing.wallMm, frame, width),
@@ -83,12 +70,14 @@ export function sectionGeometry(drawing: SectionDrawing, width: number): Section
   };
 }
 
-interface Frame {
-  readonly scale: number;
-  readonly wall: Box;
-  readonly middleX: number;
-  /** Where the room of the flaw ends and that of the labels begins. */
-  readonly edge: number;
+/** Room for the flaw and the scale that fills it, with labels beside it where the wall stays thick enough. */
+function fit(longestMm: number, wallMm: number, width: number) {
+  const scaleIn = (room: number) => Math.min((room - 24) / longestMm, TALLEST_WALL / wallMm);
+  const beside = width - LABEL_ROOM;
+  if (width >= WIDE && scaleIn(beside) * wallMm >= THINNEST_WALL) {
+    return { room: beside, scale: scaleIn(beside) };
+  }
+  return { room: width, scale: Math.max(scaleIn(width), THINNEST_WALL / wallMm) };
 }
 
 function partsOf(drawing: SectionDrawing): (readonly [Part, NamedOutline])[] {
@@ -98,10 +87,11 @@ function partsOf(drawing: SectionDrawing): (readonly [Part, NamedOutline])[] {
     ['assessed', drawing.assessed],
     ['measured', drawing.measured],
   ];
-  return all.filter((each): each is readonly [Part, NamedOutline] => each[1] !== null);
+  // the highest first: a limit that is already passed stays visible on the flaw
+  return all
+    .filter((each): each is readonly [Part, NamedOutline] => each[1] !== null)
+    .sort(([, a], [, b]) => b.heightMm - a.heightMm);
 }
-
-const yOf = (fromInsideMm: number, { wall, scale }: Frame) => wall.bottom - fromInsideMm * scale;
 
 /** Outline as an SVG path: half an ellipse on a face, a whole one in the wall, or the wall's full height. */
 function outlinePath(outline: Outline, frame: Frame): string {
@@ -123,36 +113,6 @@ function outlinePath(outline: Outline, frame: Frame): string {
 }
 
 const text = (value: number) => String(Math.round(value * 100) / 100);
-
-/** Angle above the flaw's long axis at which a leader leaves its outline. */
-const LEADER_ANGLE = { limiting: 40, expected: 34, assessed: 26, measured: 14 } as const;
-
-function leaderLabels(parts: readonly (readonly [Part, NamedOutline])[], frame: Frame) {
-  const x = frame.edge + 12;
-  const from = parts.map(([part, outline]) => {
-    const angle = (LEADER_ANGLE[part] * Math.PI) / 180;
-    const reach = (outline.lengthMm * frame.scale * Math.cos(angle)) / 2;
-    return {
-      part,
-      text: outline.label,
-      fromX: Math.min(frame.middleX + reach, frame.edge),
-      fromY: yOf(heightAt(outline, Math.sin(angle)), frame),
-      x,
-    };
-  });
-  const rows = spreadLabels(
-    from.map(({ fromY }) => fromY),
-    18,
-    { from: frame.wall.top + 12, to: frame.wall.bottom - 8 },
-  );
-  return from.map((label, i) => ({ ...label, y: rows[i] ?? label.fromY }));
-}
-
-/** Height above the inside surface of a point of the outline, by the sine of its angle [mm]. */
-function heightAt(outline: Outline, sine: number): number {
-  if (outline.kind === 'embedded') return (outline.middleMm ?? 0) + (outline.heightMm / 2) * sine;
-  return outline.heightMm * sine;
-}
 
 /** What is left of the wall ahead of the assessed flaw, or between an embedded one and the nearer face. */
 function ligamentOf(assessed: Outline, wallMm: number, frame: Frame): Dimension | null {
@@ -177,7 +137,7 @@ function ligamentEnds({ kind, face, heightMm, middleMm }: Outline, wallMm: numbe
 function lengthOf({ kind, face, lengthMm }: NamedOutline, frame: Frame): Dimension {
   const half = (lengthMm * frame.scale) / 2;
   const above = kind === 'surface' && face === 'outside';
-  const y = above ? frame.wall.top - 22 : frame.wall.bottom + 24;
+  const y = above ? frame.wall.top - 26 : frame.wall.bottom + 29;
   return {
     x1: frame.middleX - half,
     x2: frame.middleX + half,
