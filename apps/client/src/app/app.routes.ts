@@ -7,6 +7,11 @@ const pages: Routes = [
   { path: 'inspections', loadChildren: () => import('./features/inspections/inspections.routes') },
   { path: 'register', loadChildren: () => import('./features/register/register.routes') },
   { path: 'flaws', loadChildren: () => import('./features/flaws/flaws.routes') },
+  { path: 'materials', loadChildren: () => import('./features/materials/materials.routes') },
+  {
+    path: 'growth-laws',
+    loadChildren: () => import('./features/growth-laws/growth-laws.routes'),
+  },
   {
     path: 'assessments',
     loadChildren: () => import('./features/assessments/assessments.routes'),
