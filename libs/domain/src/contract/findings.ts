@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { flawFinding } from './flaws';
 import { above0, between, id, line, listQuery, optionalLine, page } from './primitives';
 import { route } from './route';

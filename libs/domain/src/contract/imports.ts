@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { FINDING_FIELD_NAMES } from './finding-field-names';
 import { id, instant, prose, version } from './primitives';
 import { route } from './route';

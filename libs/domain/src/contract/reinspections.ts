@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { id, instant, isoDate, line, listQuery, page, prose, reason, version } from './primitives';
 import { route } from './route';
 import { REINSPECTION_STATES, REMINDER_STATES, TECHNIQUES, URGENCIES } from './vocabulary';

@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { id, instant, isoDate, listQuery, page } from './primitives';
 import { route } from './route';
 import { MAIL_STATES, REMINDER_STATES } from './vocabulary';

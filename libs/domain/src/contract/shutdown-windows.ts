@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { id, isoDate, line, optionalLine, reason, version } from './primitives';
 import { route } from './route';
 import { WINDOW_KINDS, WINDOW_STATES } from './vocabulary';

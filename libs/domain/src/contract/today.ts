@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 import { isoDate } from './primitives';
 import { route } from './route';
 
