@@ -175,9 +175,7 @@ export class AssessmentDesk {
       conclusion,
       chosenReason,
       chosenDueOn: this.dueOn(),
-      ...(input && this.inputChanged()
-        ? { input: structuredClone(input) as AssessmentView['input'] }
-        : {}),
+      ...(input && this.inputChanged() ? { input: input as AssessmentView['input'] } : {}),
     };
   }
 

@@ -68,7 +68,11 @@ import { SignaturesPanel } from './signatures-panel';
   providers: [AssessmentDesk, DeskActions],
   templateUrl: './assessment-page.html',
   styleUrl: './assessment-page.scss',
-  host: { '(window:beforeunload)': 'warnBeforeClosing($event)' },
+  host: {
+    '(window:beforeunload)': 'warnBeforeClosing($event)',
+    // a folded panel would be missing on paper
+    '(window:beforeprint)': 'inputsOpen.set(true)',
+  },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class AssessmentPage implements HasUnsaved {
@@ -128,8 +132,10 @@ export class AssessmentPage implements HasUnsaved {
     const outcome = this.desk.outcome();
     return outcome?.status === 'refused' ? outcome : null;
   });
-  /** On a phone the inputs fold away until they are wanted. */
-  protected readonly inputsOpen = signal(true);
+  /** Where inputs and results do not stand side by side, the result comes first and the inputs fold away. */
+  protected readonly inputsOpen = signal(
+    typeof matchMedia === 'undefined' || matchMedia('(min-width: 1180px)').matches,
+  );
 
   constructor() {
     effect(() => this.desk.id.set(this.id()));

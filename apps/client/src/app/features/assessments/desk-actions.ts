@@ -4,6 +4,7 @@ import { type Observable, of, switchMap } from 'rxjs';
 import { type Problem, problemOf } from '../../core/http/problem';
 import { Session } from '../../core/session/session';
 import { Ask } from '../../shared/dialogs/ask';
+import { dayText } from '../../shared/format/day-text';
 import { showProblemOnForm } from '../../shared/validation/show-problem-on-form';
 import { AssessmentDesk } from './assessment-desk';
 import { AssessmentsClient } from './assessments-client';
@@ -64,7 +65,7 @@ export class DeskActions {
       .reason({
         title: 'Approve',
         text: `You sign that you checked and approved this assessment. It is in force from now on${
-          chosenDueOn ? `, and its re-inspection is due by ${chosenDueOn}` : ''
+          chosenDueOn ? `, and its re-inspection is due by ${dayText(chosenDueOn)}` : ''
         }. An approved assessment never changes.`,
         label: 'Comment (may be left empty)',
         action: 'Sign and approve',

@@ -62,7 +62,6 @@ import { inputDifferences } from './input-differences';
   styles: `
     :host {
       display: block;
-      margin-top: 16px;
     }
     .heading {
       margin: 0;

@@ -16,7 +16,6 @@ import { AssessmentsClient } from './assessments-client';
   styles: `
     :host {
       display: block;
-      margin-top: 16px;
     }
     .hash {
       overflow-wrap: anywhere;

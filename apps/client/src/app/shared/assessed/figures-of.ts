@@ -32,7 +32,7 @@ export function figuresOf(each: AssessedCase): Figure[] {
     {
       label: 'Load to reach the limit',
       value: numberText(outcome.reserveOnLoad, 2),
-      unit: '× governing load',
+      unit: '× load',
       note: 'must stay above 1',
       ...(tone ? { tone } : {}),
     },
