@@ -86,7 +86,12 @@ export async function addReactor(db: Database, siteId: string, tag?: string) {
       hoopBendingMpa: 90,
       axialMembraneMpa: 53.4,
       axialBendingMpa: 0,
-      origins: { hoopMembraneMpa: { provenance: 'standard default', note: 'Thin wall' } },
+      origins: {
+        hoopMembraneMpa: { provenance: 'standard default', note: 'Thin wall' },
+        hoopBendingMpa: { provenance: 'assumed', note: 'Peaking not measured' },
+        axialMembraneMpa: { provenance: 'standard default', note: 'Thin wall' },
+        axialBendingMpa: { provenance: 'assumed', note: 'No bending moment known' },
+      },
     })
     .returning();
   if (!location || !loadCase) throw new Error('location or load case missing');

@@ -69,9 +69,18 @@ function flawOf({ finding, inspection }: AssessmentBasis): FlawInput {
     orientation: finding.orientation,
     heightMm: measured(finding.heightMm, finding.heightQualifier),
     lengthMm: measured(finding.lengthMm, finding.lengthQualifier),
-    ligamentMm: finding.kind === 'embedded' ? measured(finding.ligamentMm ?? 0, '=') : null,
+    ligamentMm: finding.kind === 'embedded' ? ligamentOf(finding.ligamentMm, measured) : null,
   };
 }
+
+/** A ligament nobody recorded is taken as none: the flaw is then assessed as breaking the surface. */
+const ligamentOf = (
+  ligamentMm: number | null,
+  measured: (value: number, qualifier: SizeQualifier) => Given,
+): Given =>
+  ligamentMm === null
+    ? { value: 0, provenance: 'assumed', note: 'No ligament recorded: taken as none' }
+    : measured(ligamentMm, '=');
 
 function sizingOf(
   { inspection }: AssessmentBasis,

@@ -9,7 +9,8 @@ import { containing, decodeCursor } from '../../http/cursor';
 
 type Query = z.output<typeof listFlaws.query>;
 
-const newest = sql`(select n.id from findings n where n.flaw_id = ${flaws.id} order by n.inspected_on desc, n.created_at desc limit 1)`;
+/** What a void or rejected inspection recorded does not count. */
+const newest = sql`(select n.id from findings n join inspections i on i.id = n.inspection_id where n.flaw_id = ${flaws.id} and i.state not in ('void', 'rejected') order by n.inspected_on desc, n.created_at desc limit 1)`;
 const heightMm = sql<number | null>`(select n.height_mm from findings n where n.id = ${newest})`;
 const lengthMm = sql<number | null>`(select n.length_mm from findings n where n.id = ${newest})`;
 const inspectedOn = sql<
