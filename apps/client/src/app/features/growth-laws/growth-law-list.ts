@@ -1,4 +1,11 @@
-import { ChangeDetectionStrategy, Component, computed, inject, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  linkedSignal,
+  signal,
+} from '@angular/core';
 import { toSignal } from '@angular/core/rxjs-interop';
 import { MatButtonModule } from '@angular/material/button';
 import {
@@ -57,7 +64,9 @@ export class GrowthLawList {
     { initialValue: LOADING },
   );
   private readonly laws = computed(() => valueOf(this.list())?.rows ?? []);
-  protected readonly chart = computed(() => lawChart(this.laws()));
+  /** The law drawn out in the diagram; the first one until another is chosen. */
+  protected readonly drawn = linkedSignal(() => this.laws()[0]?.id);
+  protected readonly chart = computed(() => lawChart(this.laws(), this.drawn()));
   protected readonly twin = computed(() => lawTwin(this.laws()));
   protected readonly fields = computed(() => lawFields(this.open() === null));
   protected readonly start = computed(() => {

@@ -11,9 +11,6 @@ const RANGES = Array.from(
   (_each, i) => LOWEST * (HIGHEST / LOWEST) ** (i / STEPS),
 );
 
-const DASHES = ['solid', 'dashed', 'dotted', [8, 3, 2, 3], [2, 2], [12, 4]] as const;
-const INKS = ['var(--ink)', 'var(--steel)', 'var(--warn-line)', 'var(--good)', 'var(--ink-2)'];
-
 /** Points of a law from its threshold on; below it nothing grows and nothing is drawn. */
 function pointsOf(law: GrowthLawView): readonly (readonly [number, number])[] {
   const rate = growthPerCycle({
@@ -26,11 +23,24 @@ function pointsOf(law: GrowthLawView): readonly (readonly [number, number])[] {
   );
 }
 
-/** Growth per cycle over the range of stress intensity, both on logarithmic scales. */
-export function lawChart(laws: readonly GrowthLawView[]): EChartsCoreOption {
+const RAISED = [...'⁰¹²³⁴⁵⁶⁷⁸⁹'];
+
+/** A decade of a logarithmic scale: 0.001 as 10⁻³. */
+export function decade(value: number): string {
+  const exponent = Math.round(Math.log10(value));
+  const digits = [...String(Math.abs(exponent))]
+    .map((digit) => RAISED[Number(digit)] ?? '')
+    .join('');
+  return exponent === 0 ? '1' : `10${exponent < 0 ? '⁻' : ''}${digits}`;
+}
+
+/** Growth per cycle over the range of stress intensity, both logarithmic: one law drawn out, the others faint behind it. */
+export function lawChart(
+  laws: readonly GrowthLawView[],
+  chosen: string | undefined,
+): EChartsCoreOption {
   return {
     grid: { left: 64, right: 24, top: 28, bottom: 44 },
-    tooltip: { trigger: 'item' },
     xAxis: {
       type: 'log',
       min: LOWEST,
@@ -39,23 +49,37 @@ export function lawChart(laws: readonly GrowthLawView[]): EChartsCoreOption {
       nameLocation: 'middle',
       nameGap: 28,
     },
-    yAxis: { type: 'log', name: 'da/dN [mm/cycle]', splitLine: { show: true } },
-    series: laws.map((law, i) => ({
-      type: 'line',
-      name: law.title,
-      data: pointsOf(law),
-      symbol: 'none',
-      lineStyle: { color: INKS[i % INKS.length], width: 1.5, type: DASHES[i % DASHES.length] },
-      itemStyle: { color: INKS[i % INKS.length] },
-      endLabel: {
-        show: true,
-        formatter: law.key,
-        color: 'var(--ink)',
-        fontSize: 11,
-        align: 'right',
-        offset: [-8, -10],
-      },
-    })),
+    yAxis: {
+      type: 'log',
+      min: 1e-9,
+      max: 1,
+      name: 'da/dN [mm/cycle]',
+      axisLabel: { formatter: decade },
+      splitLine: { show: true },
+    },
+    series: laws.map((law) => lineOf(law, law.id === chosen)),
+  };
+}
+
+function lineOf(law: GrowthLawView, drawnOut: boolean): Readonly<Record<string, unknown>> {
+  const color = drawnOut ? 'var(--steel)' : 'var(--rule-strong)';
+  return {
+    type: 'line',
+    name: law.title,
+    data: pointsOf(law),
+    symbol: 'none',
+    silent: true,
+    z: drawnOut ? 3 : 2,
+    lineStyle: { color, width: drawnOut ? 2.5 : 1 },
+    itemStyle: { color },
+    endLabel: {
+      show: drawnOut,
+      formatter: law.key,
+      color: 'var(--steel)',
+      fontSize: 12,
+      align: 'right',
+      offset: [-12, -16],
+    },
   };
 }
 

@@ -51,25 +51,23 @@ export class ComponentPage {
     const component = valueOf(this.shown());
     if (!component) return [];
     const { requiredWallMm: least } = component;
+    const at = (celsius: number) => `MPa at ${numberText(celsius, 0)} °C`;
     return [
       { label: 'Inside diameter', value: numberText(component.insideDiameterMm), unit: 'mm' },
       {
         label: 'Nominal wall',
         value: numberText(component.wallMm),
-        unit: 'mm',
-        beside: least === null ? undefined : `least ${numberText(least)}`,
+        unit: least === null ? 'mm' : `mm, least by code ${numberText(least)}`,
       },
       {
         label: 'Design',
         value: numberText(component.designPressureMpa, 2),
-        unit: 'MPa',
-        beside: `at ${numberText(component.designTemperatureC, 0)} °C,`,
+        unit: at(component.designTemperatureC),
       },
       {
         label: 'Operating',
         value: numberText(component.operatingPressureMpa, 2),
-        unit: 'MPa',
-        beside: `at ${numberText(component.operatingTemperatureC, 0)} °C,`,
+        unit: at(component.operatingTemperatureC),
       },
     ];
   });

@@ -39,6 +39,7 @@ const STRESSES = [
   selector: 'app-component-parts',
   imports: [MatButtonModule, PartEditor, ProblemNotice, ProvenanceMark, QuantityPipe, DayPipe],
   templateUrl: './component-parts.html',
+  styles: ':host { display: block; min-width: 0; margin-top: 16px; }',
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class ComponentParts {

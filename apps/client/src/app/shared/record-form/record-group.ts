@@ -24,11 +24,11 @@ export function recordGroup(
   for (const field of fields) {
     controls[field.name] = control(start[field.name] ?? emptyOf(field), checks[field.name]);
     if (!field.origin) continue;
-    controls[`${field.name}.provenance`] = control(
+    controls[`${field.name}-provenance`] = control(
       origins[field.name]?.provenance ?? 'assumed',
       provenance,
     );
-    controls[`${field.name}.note`] = control(origins[field.name]?.note ?? '', NOTE);
+    controls[`${field.name}-note`] = control(origins[field.name]?.note ?? '', NOTE);
   }
   if (asksReason) controls['reason'] = control('', reason);
   return new FormGroup(controls);
@@ -42,7 +42,7 @@ export function recordValue(fields: readonly RecordField[], group: RecordGroup):
   for (const { name, kind, origin } of fields) {
     value[name] = kind === 'date' ? held(name) || null : held(name);
     if (origin) {
-      origins[name] = { provenance: held(`${name}.provenance`), note: held(`${name}.note`) };
+      origins[name] = { provenance: held(`${name}-provenance`), note: held(`${name}-note`) };
     }
   }
   if (Object.keys(origins).length > 0) value['origins'] = origins;
