@@ -105,6 +105,7 @@ export default defineConfig(
   {
     files: [
       'apps/api/src/main.ts',
+      'apps/api/src/start.ts',
       'apps/tools/**',
       'tests/verification/print-table.ts',
       'seeds/**',

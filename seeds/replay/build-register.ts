@@ -113,8 +113,8 @@ async function buildComponent(
     material: _material,
     location,
     moreLocations,
-    stress,
-    cycles,
+    stress: _stress,
+    cycles: _cycles,
     ...values
   } = data;
   const component = await deps.db.transaction((tx) =>

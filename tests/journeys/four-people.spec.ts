@@ -78,16 +78,17 @@ describe('from an inspector’s file to a signed decision, a date, a reminder an
       .getByLabel(/Acceptable until when/)
       .fill('Acceptable until the re-inspection at the present pressure and cycles.');
     await page.getByRole('button', { name: 'Send for check' }).click();
+    await page.getByRole('dialog').getByRole('button', { name: 'Sign and send' }).click();
     await page.getByText('Waiting for the independent check').waitFor();
-    expect(await page.getByRole('button', { name: /Approve/ }).count()).toBe(0);
+    expect(await page.getByRole('button', { name: 'Approve', exact: true }).count()).toBe(0);
     await leave(page);
 
     const checker = await signIn(plant, 'amara');
     await checker.getByRole('link', { name: /^R-401-F01, revision/ }).click();
-    await checker
-      .getByRole('button', { name: /Approve/ })
-      .first()
-      .click();
+    for (const point of await checker.locator('app-review-panel input[type=checkbox]').all()) {
+      await point.check();
+    }
+    await checker.getByRole('button', { name: 'Approve', exact: true }).click();
     const dialog = checker.getByRole('dialog');
     await dialog.getByRole('textbox').first().fill('Inputs and steps checked');
     await dialog.locator('input[type=password]').fill(DEMO_PASSWORD);

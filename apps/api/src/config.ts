@@ -1,4 +1,4 @@
-import { z } from 'zod';
+import * as z from 'zod';
 
 const onOff = z
   .enum(['on', 'off'], { error: 'must be "on" or "off"' })

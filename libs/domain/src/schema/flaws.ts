@@ -16,7 +16,7 @@ import {
   INDICATION_TYPES,
   MECHANISMS,
   ORIENTATIONS,
-  ORIGINS,
+  type ORIGINS,
   SIZE_QUALIFIERS,
   type Face,
   type FlawKind,

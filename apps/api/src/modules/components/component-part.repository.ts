@@ -1,8 +1,8 @@
 import {
   components,
-  loadCases,
-  locations,
-  operatingCycles,
+  type loadCases,
+  type locations,
+  type operatingCycles,
 } from '@ligament/domain/schema/components';
 import { and, eq, getTableColumns, sql } from 'drizzle-orm';
 import type { Database } from '../../db/database';
