@@ -17,9 +17,11 @@ import { catchError, distinctUntilChanged, map, of, switchMap } from 'rxjs';
 import { Session } from '../../core/session/session';
 import { AssessedDrawings } from '../../shared/assessed/assessed-drawings';
 import { figuresOf } from '../../shared/assessed/figures-of';
+import { assumedNames } from '../../shared/assessed/input-names';
 import type { LifeSurroundings } from '../../shared/assessed/life-of';
 import { RefusalNotice } from '../../shared/assessed/refusal-notice';
 import { verdictSentence } from '../../shared/assessed/verdict-words';
+import { Caution } from '../../shared/caution/caution';
 import { Chip } from '../../shared/chips/chip';
 import { FigureStrip } from '../../shared/figure-strip/figure-strip';
 import { DayPipe } from '../../shared/format/day-pipe';
@@ -49,6 +51,7 @@ import { SignaturesPanel } from './signatures-panel';
     MatButtonModule,
     PageHeader,
     Chip,
+    Caution,
     DayPipe,
     FailedState,
     LoadingState,
@@ -127,6 +130,10 @@ export class AssessmentPage implements HasUnsaved {
   protected readonly figures = computed(() => {
     const each = this.desk.assessed();
     return each ? figuresOf(each) : [];
+  });
+  protected readonly assumed = computed(() => {
+    const each = this.desk.assessed();
+    return each ? assumedNames(each.input, each.outcome.assumed) : [];
   });
   protected readonly refused = computed(() => {
     const outcome = this.desk.outcome();

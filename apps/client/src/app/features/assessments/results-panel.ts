@@ -1,7 +1,5 @@
 import { ChangeDetectionStrategy, Component, computed, input } from '@angular/core';
 import type { AssessedCase } from '../../shared/assessed/assessed-case';
-import { assumedNames } from '../../shared/assessed/input-names';
-import { Caution } from '../../shared/caution/caution';
 import { numberText } from '../../shared/quantity/quantity-text';
 import { CalculationSheet } from './calculation-sheet';
 import { resultRows } from './result-rows';
@@ -10,7 +8,7 @@ import { ValidityTable } from './validity-table';
 /** What the engine answers in numbers: results, limits met, cautions, and the steps that lead there. */
 @Component({
   selector: 'app-results-panel',
-  imports: [Caution, CalculationSheet, ValidityTable],
+  imports: [CalculationSheet, ValidityTable],
   templateUrl: './results-panel.html',
   styleUrl: './results-panel.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -20,8 +18,5 @@ export class ResultsPanel {
 
   protected readonly outcome = computed(() => this.assessed().outcome);
   protected readonly rows = computed(() => resultRows(this.outcome()));
-  protected readonly assumed = computed(() =>
-    assumedNames(this.assessed().input, this.outcome().assumed),
-  );
   protected readonly numberText = numberText;
 }

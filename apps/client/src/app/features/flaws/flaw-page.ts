@@ -97,6 +97,11 @@ export class FlawPage {
     return flaw.assessments.find(({ state }) => state !== 'approved' && state !== 'superseded');
   }
 
+  protected openWords(state: string): string {
+    if (!this.session.can('assessments.write')) return 'Open the assessment';
+    return state === 'submitted' ? 'Open the check' : 'Go on with the draft';
+  }
+
   protected mayStart(flaw: FlawView): boolean {
     const settled = flaw.state === 'removed' || flaw.state === 'closed';
     return (

@@ -31,7 +31,7 @@ export function figuresOf(each: AssessedCase): Figure[] {
     },
     {
       label: 'Load to reach the limit',
-      value: numberText(outcome.reserveOnLoad, 2),
+      value: outcome.reserveOnLoad.toFixed(2),
       unit: '× load',
       note: 'must stay above 1',
       ...(tone ? { tone } : {}),
