@@ -85,6 +85,7 @@ describe('from an inspector’s file to a signed decision, a date, a reminder an
 
     const checker = await signIn(plant, 'amara');
     await checker.getByRole('link', { name: /^R-401-F01, revision/ }).click();
+    await checker.getByRole('heading', { name: 'Independent check' }).waitFor();
     for (const point of await checker.locator('app-review-panel input[type=checkbox]').all()) {
       await point.check();
     }

@@ -43,7 +43,7 @@ export async function start(env: Readonly<Record<string, string | undefined>>): 
       log,
       databaseHealthy: database.healthy,
     };
-    const setUpToken = await prepare(deps);
+    const prepared = await prepare(deps);
     const mail = await startMail(deps);
     closers.unshift(() => mail.close());
     const jobs = startJobs(deps, mail.mailer);
@@ -51,7 +51,7 @@ export async function start(env: Readonly<Record<string, string | undefined>>): 
     const { app } = createApp({ ...deps, mailer: mail.mailer }, resolve(ROOT, 'dist/client'));
     const server = await listen(app, config.host, config.port);
     closers.unshift(() => drain(server, GRACE_SECONDS));
-    announce(config, portOf(server), setUpToken);
+    announce(config, portOf(server), prepared);
     closeOnSignal(closers);
   } catch (error) {
     for (const close of closers) await close();
@@ -59,17 +59,24 @@ export async function start(env: Readonly<Record<string, string | undefined>>): 
   }
 }
 
-/** Fills an empty database: with the invented plant, or with the means to create the first administrator. */
-async function prepare(deps: Deps): Promise<string | null> {
-  const [site] = await deps.db.select({ id: sites.id }).from(sites).limit(1);
-  if (site) return null;
-  if (!deps.config.demo) return issueSetUpToken(deps);
-  console.log('Filling the empty database with the demonstration plant …');
-  await seedDemo(deps);
-  return null;
+interface Prepared {
+  /** Whether the database holds the demonstration plant. */
+  readonly demo: boolean;
+  /** One-time token with which the first administrator is created; null when that is done. */
+  readonly setUpToken: string | null;
 }
 
-function announce(config: Config, port: number, setUpToken: string | null): void {
+/** Fills an empty database: with the invented plant, or with the means to create the first administrator. */
+async function prepare(deps: Deps): Promise<Prepared> {
+  const [site] = await deps.db.select({ demo: sites.demo }).from(sites).limit(1);
+  if (site) return { demo: site.demo, setUpToken: null };
+  if (!deps.config.demo) return { demo: false, setUpToken: await issueSetUpToken(deps) };
+  console.log('Filling the empty database with the demonstration plant …');
+  await seedDemo(deps);
+  return { demo: true, setUpToken: null };
+}
+
+function announce(config: Config, port: number, { demo, setUpToken }: Prepared): void {
   const address = config.publicUrl.replace(/:0$/, `:${port}`);
   console.log(`\nLigament is ready at ${address}`);
   if (setUpToken !== null) {
@@ -77,7 +84,7 @@ function announce(config: Config, port: number, setUpToken: string | null): void
       `Create the first administrator (once, within 24 hours): ${address}/setup#${setUpToken}`,
     );
   }
-  if (config.demo) {
+  if (demo) {
     console.log(`Demonstration sign-ins, all with the password "${DEMO_PASSWORD}":`);
     for (const person of DEMO_PEOPLE) console.log(`  ${person.role.padEnd(14)} ${person.email}`);
   }
