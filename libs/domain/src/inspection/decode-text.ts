@@ -46,7 +46,7 @@ export function decodeText(bytes: Uint8Array): DecodeResult {
   try {
     return decoded(new TextDecoder('utf-8', { fatal: true }).decode(bytes), 'UTF-8', mark);
   } catch (error) {
-    if (!(error instanceof TypeError)) throw error;
+    if (!isNotUtf8(error)) throw error;
     return decoded(new TextDecoder('windows-1252').decode(bytes), 'Windows-1252', false);
   }
 }
@@ -55,3 +55,7 @@ const decoded = (text: string, encoding: DecodedText['encoding'], mark: boolean)
   state: 'text',
   decoded: { text: text.replace(/^\ufeff/, ''), encoding, mark },
 });
+
+/** What a strict decoder throws; told by its name, since it may come from another realm. */
+const isNotUtf8 = (error: unknown): boolean =>
+  typeof error === 'object' && error !== null && 'name' in error && error.name === 'TypeError';

@@ -76,12 +76,15 @@ export function detectDecimalMark(cells: readonly string[]): {
   readonly comma: number;
   readonly point: number;
 } {
-  const count = (pattern: RegExp) => cells.filter((cell) => pattern.test(cell.trim())).length;
-  const comma =
-    count(/^[<>~≤≥]?\s*[+-]?(\d{1,3}(\.\d{3})+|\d+),\d{1,2}(\D|$)/) +
-    count(/^[+-]?\d{1,3}(\.\d{3})+,\d+$/);
-  const point =
-    count(/^[<>~≤≥]?\s*[+-]?(\d{1,3}(,\d{3})+|\d+)\.\d{1,2}(\D|$)/) +
-    count(/^[+-]?\d{1,3}(,\d{3})+\.\d+$/);
+  const count = (...patterns: readonly RegExp[]) =>
+    cells.filter((cell) => patterns.some((pattern) => pattern.test(cell.trim()))).length;
+  const comma = count(
+    /^[<>~≤≥]?\s*[+-]?(\d{1,3}(\.\d{3})+|\d+),\d{1,2}(\D|$)/,
+    /^[+-]?\d{1,3}(\.\d{3})+,\d+$/,
+  );
+  const point = count(
+    /^[<>~≤≥]?\s*[+-]?(\d{1,3}(,\d{3})+|\d+)\.\d{1,2}(\D|$)/,
+    /^[+-]?\d{1,3}(,\d{3})+\.\d+$/,
+  );
   return { mark: comma > point ? ',' : '.', comma, point };
 }
