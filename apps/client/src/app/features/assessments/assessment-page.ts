@@ -1,4 +1,5 @@
 import {
+  ApplicationRef,
   ChangeDetectionStrategy,
   Component,
   computed,
@@ -17,7 +18,7 @@ import { catchError, distinctUntilChanged, map, of, switchMap } from 'rxjs';
 import { Session } from '../../core/session/session';
 import { AssessedDrawings } from '../../shared/assessed/assessed-drawings';
 import { figuresOf } from '../../shared/assessed/figures-of';
-import { assumedNames } from '../../shared/assessed/input-names';
+import { weakInputs } from '../../shared/assessed/input-names';
 import type { LifeSurroundings } from '../../shared/assessed/life-of';
 import { RefusalNotice } from '../../shared/assessed/refusal-notice';
 import { verdictSentence } from '../../shared/assessed/verdict-words';
@@ -73,8 +74,9 @@ import { SignaturesPanel } from './signatures-panel';
   styleUrl: './assessment-page.scss',
   host: {
     '(window:beforeunload)': 'warnBeforeClosing($event)',
-    // a folded panel would be missing on paper
-    '(window:beforeprint)': 'inputsOpen.set(true)',
+    // on paper inputs stand as text, and none is folded away
+    '(window:beforeprint)': 'layOutForPrint(true)',
+    '(window:afterprint)': 'layOutForPrint(false)',
   },
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
@@ -85,6 +87,7 @@ export class AssessmentPage implements HasUnsaved {
   protected readonly actions = inject(DeskActions);
   private readonly client = inject(AssessmentsClient);
   private readonly session = inject(Session);
+  private readonly application = inject(ApplicationRef);
 
   private readonly flaw = toSignal(
     toObservable(computed(() => this.desk.recorded()?.flawId)).pipe(
@@ -131,9 +134,9 @@ export class AssessmentPage implements HasUnsaved {
     const each = this.desk.assessed();
     return each ? figuresOf(each) : [];
   });
-  protected readonly assumed = computed(() => {
+  protected readonly weak = computed(() => {
     const each = this.desk.assessed();
-    return each ? assumedNames(each.input, each.outcome.assumed) : [];
+    return each ? weakInputs(each.input, each.outcome.assumed) : { assumed: [], defaults: [] };
   });
   protected readonly refused = computed(() => {
     const outcome = this.desk.outcome();
@@ -143,6 +146,8 @@ export class AssessmentPage implements HasUnsaved {
   protected readonly inputsOpen = signal(
     typeof matchMedia === 'undefined' || matchMedia('(min-width: 1180px)').matches,
   );
+
+  protected readonly printing = signal(false);
 
   constructor() {
     effect(() => this.desk.id.set(this.id()));
@@ -168,6 +173,13 @@ export class AssessmentPage implements HasUnsaved {
   protected mine() {
     const { conclusion, chosenDueOn, chosenReason } = this.desk.body();
     return { ...ordered(this.desk.input()), conclusion, chosenDueOn, chosenReason };
+  }
+
+  protected layOutForPrint(printing: boolean): void {
+    this.printing.set(printing);
+    if (printing) this.inputsOpen.set(true);
+    // the browser takes its picture as soon as this returns
+    this.application.tick();
   }
 
   protected print(): void {

@@ -3,7 +3,7 @@ import { RouterLink } from '@angular/router';
 import type { FlawView } from '@ligament/domain/contract/flaws';
 import { AssessedDrawings } from '../../shared/assessed/assessed-drawings';
 import { figuresOf } from '../../shared/assessed/figures-of';
-import { assumedNames } from '../../shared/assessed/input-names';
+import { weakInputs } from '../../shared/assessed/input-names';
 import type { LifeSurroundings } from '../../shared/assessed/life-of';
 import { RefusalNotice } from '../../shared/assessed/refusal-notice';
 import { verdictSentence } from '../../shared/assessed/verdict-words';
@@ -49,9 +49,9 @@ export class FlawStanding {
     if (this.shown().standing !== 'approved' && verdict !== 'not acceptable') return 'unsigned';
     return verdict === 'not acceptable' ? 'bad' : verdict === 'near the limit' ? 'warn' : 'good';
   });
-  protected readonly assumed = computed(() => {
+  protected readonly weak = computed(() => {
     const each = this.assessed();
-    return each ? assumedNames(each.input, each.outcome.assumed) : [];
+    return each ? weakInputs(each.input, each.outcome.assumed) : { assumed: [], defaults: [] };
   });
   protected readonly proposal = computed(() => {
     const { proposal } = this.shown();

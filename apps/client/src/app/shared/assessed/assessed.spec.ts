@@ -3,7 +3,7 @@ import { sampleInput, type Variation } from '@ligament/domain/assessment/testing
 import type { AssessedCase } from './assessed-case';
 import { diagramOf, diagramTable } from './diagram-of';
 import { figuresOf } from './figures-of';
-import { assumedNames, inputName } from './input-names';
+import { inputName, weakInputs } from './input-names';
 import { lifeOf } from './life-of';
 import { lifeWords } from './life-words';
 import { atLimit, atNextInspection } from './milestones';
@@ -132,9 +132,9 @@ describe('words and figures', () => {
         poissonsRatio: { value: 0.3, provenance: 'standard default' as const, note: '' },
       },
     };
-    expect(assumedNames(marked, ['material.poissonsRatio', 'wall.thicknessMm'])).toEqual([
-      'Poisson’s ratio (standard default)',
-      'wall thickness',
-    ]);
+    expect(weakInputs(marked, ['material.poissonsRatio', 'wall.thicknessMm'])).toEqual({
+      assumed: ['wall thickness'],
+      defaults: ['Poisson’s ratio'],
+    });
   });
 });

@@ -54,12 +54,19 @@ export function inputName(path: string): InputName {
   return { name: places.length > 0 ? `${name}, ${places.join(', ')}` : name, unit };
 }
 
-/** Inputs that rest on an assumption or a standard's default, in words, for the caution beside a verdict. */
-export function assumedNames(input: AssessmentInput, paths: readonly string[]): string[] {
-  return paths.map((path) => {
-    const name = withinSentence(inputName(path).name);
-    return provenanceAt(input, path) === 'standard default' ? `${name} (standard default)` : name;
-  });
+/** Inputs that are not known, by how weak they are, in words for the caution beside a verdict. */
+export interface WeakInputs {
+  readonly assumed: readonly string[];
+  readonly defaults: readonly string[];
+}
+
+export function weakInputs(input: AssessmentInput, paths: readonly string[]): WeakInputs {
+  const isDefault = (path: string) => provenanceAt(input, path) === 'standard default';
+  const names = (of: readonly string[]) => of.map((path) => withinSentence(inputName(path).name));
+  return {
+    assumed: names(paths.filter((path) => !isDefault(path))),
+    defaults: names(paths.filter(isDefault)),
+  };
 }
 
 /** A name inside a sentence: its first letter is small unless it belongs to a person. */

@@ -9,9 +9,14 @@ import { ChangeDetectionStrategy, Component, input } from '@angular/core';
     @if (assumed().length > 0) {
       <strong class="warn">Assumed, not known: {{ assumed().join(', ') }}.</strong>
     }
+    @if (defaults().length > 0) {
+      Standard defaults: {{ defaults().join(', ') }}.
+    }
   </p>`,
   changeDetection: ChangeDetectionStrategy.OnPush,
 })
 export class Caution {
   readonly assumed = input<readonly string[]>([]);
+  /** Inputs taken from a standard rather than from this plant. */
+  readonly defaults = input<readonly string[]>([]);
 }
