@@ -7,7 +7,7 @@ import type { Role } from '@ligament/domain/contract/policy';
 import { DEFAULT_SITE_RULES } from '@ligament/domain/contract/site-rules';
 import { problemInterceptor } from '../../core/http/problem-interceptor';
 import { Session } from '../../core/session/session';
-import { ASSESSMENT_ID, assessmentOf, flawOf } from '../../testing/assessment-of';
+import { ASSESSMENT_ID, assessmentOf, flawOf } from '../../shared/assessed/testing/assessment-of';
 import { sessionOf } from '../../testing/session-of';
 import { AssessmentPage } from './assessment-page';
 

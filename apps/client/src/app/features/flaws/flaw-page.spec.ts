@@ -11,7 +11,7 @@ import {
   FLAW_ID,
   findingOf,
   flawOf,
-} from '../../testing/assessment-of';
+} from '../../shared/assessed/testing/assessment-of';
 import { sessionOf } from '../../testing/session-of';
 import { FlawPage } from './flaw-page';
 import { flawRowsCsv } from './flaw-rows-csv';
