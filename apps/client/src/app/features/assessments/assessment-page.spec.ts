@@ -126,6 +126,14 @@ describe('the workbench of an assessment', () => {
     expect(button('Approve').disabled).toBe(false);
   });
 
+  it('warns who opens another’s draft that changing it rules out checking it', async () => {
+    await open(assessmentOf());
+    expect(text()).toContain('Whoever saves a change in it cannot check it later.');
+    TestBed.resetTestingModule();
+    await open(assessmentOf({ authorId: sessionOf('engineer').user.id }));
+    expect(text()).not.toContain('cannot check it later');
+  });
+
   it('offers no check of one’s own work, and nothing to other roles', async () => {
     const own = sessionOf('engineer').user.id;
     await open(assessmentOf({ state: 'submitted', editorIds: [own] }));

@@ -43,7 +43,7 @@ export interface Figure {
     }
     dl {
       display: grid;
-      grid-template-columns: repeat(auto-fit, minmax(150px, 1fr));
+      grid-template-columns: repeat(auto-fit, minmax(132px, 1fr));
       margin: 0;
       background: var(--sheet);
       border: 1px solid var(--rule);
