@@ -1,5 +1,6 @@
 import { readFileSync } from 'node:fs';
 import type { ImportRow, ImportView } from '@ligament/domain/contract/imports';
+import { locations } from '@ligament/domain/schema/components';
 import { findings, flaws } from '@ligament/domain/schema/flaws';
 import { eq } from 'drizzle-orm';
 import { addFinding, addReactor } from '../support/plant-records';
@@ -36,14 +37,14 @@ const BODY = {
 };
 let report = 0;
 
-async function inspectionOf(tag: string, inspectedOn = '2026-11-30') {
+async function inspectionOf(tag: string, inspectedOn = '2026-11-30', reportNo = '') {
   const reactor = await addReactor(plant.db, plant.siteId, tag);
   report += 1;
   const added = await inspector()
     .post(`/api/components/${reactor.component.id}/inspections`)
-    .send({ ...BODY, reportNo: `BW-${report}`, inspectedOn });
+    .send({ ...BODY, reportNo: reportNo || `BW-${report}`, inspectedOn });
   expect(added.status).toBe(201);
-  return { reactor, inspection: added.body as { id: string; version: number } };
+  return { reactor, inspection: added.body as { id: string; version: number; reportNo: string } };
 }
 
 const upload = (inspectionId: string, bytes: Buffer, name = 'findings.csv') =>
@@ -58,15 +59,19 @@ const rowOf = (view: ImportView, row: number): ImportRow => {
   return found;
 };
 const levels = (row: ImportRow) => row.problems.map(({ level, field }) => `${level} ${field}`);
-/** The component's tag stands in the file; another reactor of the same kind needs its own. */
-const forTag = (bytes: Buffer, tag: string) =>
+/** Tag and report number stand in the file; another reactor of the same kind needs its own. */
+const forTag = (bytes: Buffer, tag: string, reportNo = `BW-${report}`) =>
   Buffer.from(
-    bytes.toString('utf8').replaceAll('R-401', tag).replaceAll('R 401', tag.replace('-', ' ')),
+    bytes
+      .toString('utf8')
+      .replaceAll('R-401', tag)
+      .replaceAll('R 401', tag.replace('-', ' '))
+      .replaceAll(/BW-26-1\d\d/g, reportNo),
   );
 
 describe('the import of an inspector’s file', () => {
   it('reads a file, tells two bad rows by row and column, and commits once they are fixed', async () => {
-    const { reactor, inspection } = await inspectionOf('R-401');
+    const { reactor, inspection } = await inspectionOf('R-401', '2026-11-30', 'BW-26-140');
     const known = await addFinding(plant.db, reactor, {
       on: '2024-11-12',
       heightMm: 6.3,
@@ -206,6 +211,74 @@ describe('the import of an inspector’s file', () => {
     expect(rowOf(view, 2).problems[0]?.message).toContain('never guessed');
     const inches = (await change(view, { answers: { lengthUnit: 'in' } })).body as ImportView;
     expect(rowOf(inches, 2).finding).toMatchObject({ heightMm: 7.62, lengthMm: 38.1 });
+  });
+
+  it('asks again once an answer or a correction makes a row read otherwise', async () => {
+    const { reactor, inspection } = await inspectionOf('R-4016');
+    const known = await addFinding(plant.db, reactor, {
+      on: '2024-11-12',
+      heightMm: 5,
+      lengthMm: 60,
+    });
+    await plant.db.update(flaws).set({ axialMm: 3000 }).where(eq(flaws.id, known.flawId));
+    const bytes = Buffer.from(
+      'weld,ind,axial mm,height,length,opens to,orientation\nL1,1,500,<0.9,2,ID,axial\n',
+    );
+    const view = (await upload(inspection.id, bytes)).body as ImportView;
+    const mm = (await change(view, { answers: { lengthUnit: 'mm' } })).body as ImportView;
+    const confirmed = (
+      await change(mm, {
+        decisions: [{ row: 2, take: true, confirmed: true, flaw: { kind: 'new' } }],
+      })
+    ).body as ImportView;
+    expect(rowOf(confirmed, 2)).toMatchObject({ ready: true, decision: { confirmed: true } });
+    const inches = (await change(confirmed, { answers: { lengthUnit: 'in' } })).body as ImportView;
+    expect(rowOf(inches, 2)).toMatchObject({ ready: false, decision: { confirmed: false } });
+    const column = view.mapping.find(({ field }) => field === 'axial')?.index ?? -1;
+    const moved = (
+      await change(inches, {
+        answers: { lengthUnit: 'mm' },
+        corrections: [{ row: 2, column, value: '3001', reason: 'Sheet 2' }],
+      })
+    ).body as ImportView;
+    expect(rowOf(moved, 2).decision).toMatchObject({ confirmed: false, flaw: null });
+    expect(rowOf(moved, 2).candidates[0]).toMatchObject({ flawId: known.flawId, distanceMm: 1 });
+    expect((await inspector().post(`/api/imports/${view.id}/commit`)).status).toBe(422);
+  });
+
+  it('never continues a flaw of another weld', async () => {
+    const { reactor, inspection } = await inspectionOf('R-4017');
+    const known = await addFinding(plant.db, reactor, {
+      on: '2024-11-12',
+      heightMm: 5,
+      lengthMm: 60,
+    });
+    const [other] = await plant.db
+      .insert(locations)
+      .values({ ...reactor.location, id: undefined, name: 'L2' })
+      .returning();
+    const bytes = Buffer.from(
+      'weld,ind,height mm,length mm,opens to,orientation\nL2,1,4,30,ID,axial\n',
+    );
+    const view = (await upload(inspection.id, bytes)).body as ImportView;
+    const flaw = { kind: 'continues' as const, flawId: known.flawId };
+    const chosen = (
+      await change(view, { decisions: [{ row: 2, take: true, confirmed: true, flaw }] })
+    ).body as ImportView;
+    expect(rowOf(chosen, 2)).toMatchObject({ ready: false });
+    expect(rowOf(chosen, 2).problems.at(-1)?.message).toContain('does not lie in L2');
+    expect((await inspector().post(`/api/imports/${view.id}/commit`)).status).toBe(422);
+    const byHand = await inspector()
+      .post(`/api/inspections/${inspection.id}/findings`)
+      .send({
+        ...{ indicationNo: '9', locationId: other?.id, indicationType: 'crack', kind: 'surface' },
+        ...{ face: 'inside', orientation: 'axial', heightMm: 5, lengthMm: 40, ligamentMm: null },
+        ...{ axialMm: 100, circumferentialMm: null, wallMm: null, remarks: '', flaw },
+      });
+    expect([byHand.status, byHand.body.type]).toEqual([
+      422,
+      expect.stringContaining('finding.other-weld'),
+    ]);
   });
 
   it.each([

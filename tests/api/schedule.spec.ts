@@ -1,3 +1,4 @@
+import { inspections } from '@ligament/domain/schema/inspections';
 import {
   reinspections,
   receivedMails,
@@ -216,6 +217,36 @@ describe('reminders', () => {
     expect(await sendQueuedMails(plant.deps, mailer)).toEqual({ sent: 0, failed: 0 });
     expect(sent).toEqual([]);
     expect(await queueReminders(plant.deps)).toBe(0);
+  });
+
+  it('are told after all when the report that fulfilled the task is declared void', async () => {
+    const { task: row, inspection } = await task('2026-12-10', { plannedOn: '2026-12-05' });
+    const { queueReminders } = await import('../../apps/api/src/modules/reminders/queue-reminders');
+    const queued = await queueReminders(plant.deps);
+    expect(queued).toBeGreaterThan(0);
+    const path = `/api/inspections/${inspection.id}`;
+    await plant.db
+      .update(inspections)
+      .set({ state: 'submitted' })
+      .where(eq(inspections.id, inspection.id));
+    const engineer = as(plant.app, plant.engineer);
+    const seen = (await engineer.get(path)).body as { version: number };
+    const accepted = await engineer.post(`${path}/accept`).set('If-Match', etag(seen.version));
+    expect(accepted.body.state).toBe('accepted');
+    const stateOf = async () =>
+      (await plant.db.select().from(reinspections).where(eq(reinspections.id, row.id)))[0];
+    expect(await stateOf()).toMatchObject({ state: 'done', doneInspectionId: inspection.id });
+    const sent: string[] = [];
+    const mailer: Mailer = { send: async ({ to }) => void sent.push(to), close: () => undefined };
+    expect(await sendQueuedMails(plant.deps, mailer)).toEqual({ sent: 0, failed: 0 });
+    const gone = await engineer
+      .post(`${path}/void`)
+      .set('If-Match', etag(accepted.body.version))
+      .send({ reason: 'Wrong vessel' });
+    expect([gone.status, gone.body.state]).toEqual([200, 'void']);
+    expect(await stateOf()).toMatchObject({ state: 'planned', doneInspectionId: null });
+    expect(await sendQueuedMails(plant.deps, mailer)).toEqual({ sent: queued, failed: 0 });
+    expect(sent.length).toBe(queued);
   });
 
   it('are tried again after a failure, parked after a refusal for good, and two senders never send one twice', async () => {

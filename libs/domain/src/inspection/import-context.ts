@@ -12,6 +12,8 @@ import type { LengthUnit } from './recognise-columns';
 /** The component and inspection that a file is checked against. */
 export interface ImportContext {
   readonly tag: string;
+  /** Number of the report that the findings belong to. */
+  readonly reportNo: string;
   readonly wallMm: number;
   readonly insideDiameterMm: number;
   readonly locations: readonly {

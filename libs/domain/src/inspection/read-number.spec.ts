@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import { detectDecimalMark, readNumber } from './read-number';
+import { detectDecimalMark, mayBeThousands, readNumber } from './read-number';
 
 const value = (cell: string, mark: '.' | ',' = '.') => {
   const result = readNumber(cell, mark);
@@ -35,6 +35,7 @@ describe('readNumber', () => {
     ['>25', 25, '>', null],
     ['~6', 6, '~', null],
     ['2-3', 3, '<', null],
+    ['4-2', 4, '<', null],
     ['2.0 mm', 2, '=', 'mm'],
     ['0.12in', 0.12, '=', 'in'],
     ['1.5"', 1.5, '=', 'in'],
@@ -54,6 +55,20 @@ describe('readNumber', () => {
         return result.state !== 'number' || Number.isFinite(result.read.value);
       }),
     );
+  });
+});
+
+describe('mayBeThousands', () => {
+  it.each([
+    ['75,250', '.', true],
+    ['<75,250 mm', '.', true],
+    ['1.250', ',', true],
+    ['1,250.5', '.', false],
+    ['0,250', '.', false],
+    ['75.250', '.', false],
+    ['1,250,000', '.', false],
+  ] as const)('of %s in a file with %s: %s', (cell, mark, doubtful) => {
+    expect(mayBeThousands(cell, mark)).toBe(doubtful);
   });
 });
 

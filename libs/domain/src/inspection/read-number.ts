@@ -41,8 +41,25 @@ export function readNumber(cell: string, decimalMark: '.' | ','): NumberResult {
   const unit = UNITS.find(([pattern]) => pattern.test(rest));
   if (unit) rest = rest.replace(unit[0], '').trim();
   const range = /^(\d[\d.,]*)\s*(?:-|–|to|\.\.)\s*(\d[\d.,]*)$/.exec(rest);
-  if (range) return asNumber(range[2] ?? '', decimalMark, '<', unit?.[1] ?? null);
+  if (range) {
+    const ends = [range[1], range[2]].map((end) =>
+      asNumber(end ?? '', decimalMark, '<', unit?.[1] ?? null),
+    );
+    return ends.reduce((most, end) =>
+      most.state === 'number' && end.state === 'number' && end.read.value <= most.read.value
+        ? most
+        : most.state === 'number'
+          ? end
+          : most,
+    );
+  }
   return asNumber(rest, decimalMark, qualifier, unit?.[1] ?? null);
+}
+
+/** Whether a cell such as `75,250` may be a decimal number or one with a thousands mark: 75.25 or 75250. */
+export function mayBeThousands(cell: string, decimalMark: '.' | ','): boolean {
+  const other = decimalMark === '.' ? ',' : '.';
+  return new RegExp(`^\\D*[1-9]\\d{0,2}\\${other}\\d{3}\\D*$`).test(cell.trim());
 }
 
 function asNumber(

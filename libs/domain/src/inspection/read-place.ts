@@ -36,6 +36,7 @@ export function readPlace(
       `${Math.round(centre)} mm lies outside weld ${location.name}, which is ${location.lengthMm} mm long. Check datum and unit, then confirm or correct.`,
     );
   }
+  if (location && along) checkLength(read, along.mm, location, context, problems);
   const around = readAround(read, location?.circumferenceOn ?? 'outside', context, problems);
   return location
     ? {
@@ -45,6 +46,25 @@ export function readPlace(
         circumferentialMm: around ?? null,
       }
     : undefined;
+}
+
+/** A flaw cannot be longer than its weld, or than once around. */
+function checkLength(
+  read: RowCells,
+  lengthMm: number,
+  location: ImportContext['locations'][number],
+  context: ImportContext,
+  problems: ProblemList,
+): void {
+  const round = Math.PI * (context.insideDiameterMm + 2 * context.wallMm);
+  const longest = location.lengthMm ?? (location.kind === 'circumferential weld' ? round : null);
+  if (longest === null || lengthMm <= longest) return;
+  problems.add(
+    'stop',
+    'length',
+    read.text('length'),
+    `${Math.round(lengthMm)} mm is longer than ${location.name}, which is ${Math.round(longest)} mm long. Check decimal mark and unit.`,
+  );
 }
 
 /** Distance around the shell in millimetres, from millimetres or a clock position. */
@@ -86,17 +106,32 @@ function readAround(
     );
     return undefined;
   }
-  const read2 = read.length('circumferential');
-  if (read2 && (read2.mm > round * 1.001 || read2.mm < -round)) {
+  const distance = read.length('circumferential');
+  if (distance && !distance.unit && mayBeDial(read, distance.value)) {
+    problems.add(
+      'hold',
+      'circumferential',
+      cell,
+      `“${cell}” may be a clock position, an angle or a part of a day; it is read as ${distance.mm} mm around. Confirm millimetres, or enter h:mm.`,
+    );
+  }
+  if (distance && (distance.mm > round * 1.001 || distance.mm < -round)) {
     problems.add(
       'stop',
       'circumferential',
       cell,
-      `${Math.round(read2.mm)} mm is more than once around: the circumference is ${Math.round(round)} mm on the ${measuredOn}.`,
+      `${Math.round(distance.mm)} mm is more than once around: the circumference is ${Math.round(round)} mm on the ${measuredOn}.`,
     );
     return undefined;
   }
-  return read2?.mm;
+  return distance?.mm;
+}
+
+/** Whether a bare number stands where a clock or an angle may be meant: `3.30`, `0.1458`, or under such a heading. */
+function mayBeDial(read: RowCells, value: number): boolean {
+  if (/clock|uhr|angle|winkel|deg|°|grad/i.test(read.header('circumferential'))) return true;
+  const bare = read.headerUnit('circumferential') === null && value > 0;
+  return bare && (value < 1 || /^\d{1,2}[.,][0-5]\d$/.test(read.text('circumferential')));
 }
 
 const plain = (name: string): string => name.replaceAll(/[\s\-_.]/g, '').toUpperCase();

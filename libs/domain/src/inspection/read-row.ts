@@ -27,7 +27,8 @@ export function readRow(
   checkBelonging(read, context, problems);
   const place = readPlace(read, answers, context, problems);
   const size = readSize(read, context, problems);
-  const shape = readShape(read, answers, context, size, problems);
+  const weld = context.locations.find(({ id }) => id === place?.locationId)?.kind;
+  const shape = readShape(read, answers, context, weld, size, problems);
   const indicationNo = read.text('indicationNo') || `row ${row}`;
   if (!read.text('indicationNo')) {
     problems.add(
@@ -56,6 +57,15 @@ function checkBelonging(read: RowCells, context: ImportContext, problems: Proble
       alike
         ? `“${tag}” is taken as ${context.tag}. Confirm that it is the same component.`
         : `This inspection is of ${context.tag}, the row says “${tag}”. The row is left out; import it with the inspection of that component, or correct the tag.`,
+    );
+  }
+  const report = read.text('reportNo');
+  if (report && plainTag(report) !== plainTag(context.reportNo)) {
+    problems.add(
+      'hold',
+      'reportNo',
+      report,
+      `The row names report “${report}”, this inspection has report ${context.reportNo}. Confirm that it belongs here, or leave it out.`,
     );
   }
   const written = read.text('inspectionDate');

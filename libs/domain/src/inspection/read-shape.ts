@@ -1,9 +1,12 @@
-import type { Face } from '../contract/vocabulary';
+import type { Face, FlawKind, LocationKind } from '../contract/vocabulary';
+import { readDirection } from './read-direction';
+import { readLigament } from './read-ligament';
+import { readFace, readIndicationType, readKind, saysNothing } from './read-word';
 import type { CandidateFinding, ImportAnswers, ImportContext } from './import-context';
-import { readFace, readIndicationType, readKind, readOrientation } from './read-word';
 import type { Size } from './read-size';
 import type { RowCells } from './row-cells';
 import type { ProblemList } from './row-problem';
+import { marginsOf } from './wall-margins';
 
 type Shape = Pick<
   CandidateFinding,
@@ -18,93 +21,127 @@ export function readShape(
   read: RowCells,
   answers: ImportAnswers,
   context: ImportContext,
+  weld: LocationKind | undefined,
   size: Size | undefined,
   problems: ProblemList,
 ): Shape | undefined {
-  const indicationType =
-    readIndicationType(read.text('indicationType')) ?? answers.indicationType ?? 'unknown';
-  if (indicationType === 'unknown') {
-    problems.add(
-      'note',
-      'indicationType',
-      read.text('indicationType'),
-      'The type is not known: it counts as crack-like until it is ruled out.',
-    );
-  }
-  const orientation = readOrientation(read.text('orientation')) ?? answers.orientation;
-  if (!orientation)
-    problems.add(
-      'stop',
-      'orientation',
-      read.text('orientation'),
-      'Axial or circumferential? The direction is not given; choose it above for the whole file, or enter it.',
-    );
-  const opensTo = read.text('opensTo');
-  const side = readFace(opensTo);
-  if (opensTo && !side && !isNoSide(opensTo)) {
-    problems.add(
-      'stop',
-      'opensTo',
-      opensTo,
-      `“${opensTo}” names no side. Enter inside (ID) or outside (OD).`,
-    );
-  }
-  const ligament = read.length('ligament')?.mm ?? null;
-  const kind =
-    readKind(read.text('positionType')) ??
-    readKind(read.text('indicationType')) ??
-    (side ? 'surface' : ligament !== null && ligament > 0 ? 'embedded' : answers.kind);
-  if (!kind)
-    problems.add(
-      'stop',
-      'positionType',
-      read.text('positionType'),
-      'Surface or embedded? It is not given; choose it above for the whole file, or enter it.',
-    );
+  checkScanSurface(read, context, problems);
+  const indicationType = readType(read, answers, problems);
+  const orientation = readDirection(read, answers, weld, problems);
+  const side = readSide(read, problems);
+  const stated = read.length('ligament')?.mm ?? null;
+  const kind = readPosition(read, answers, side, stated, problems);
   if (!kind || !orientation) return undefined;
   const face = kind === 'surface' ? (side ?? answers.face) : nearerFace(context, size);
   if (!face) {
     problems.add(
       'stop',
       'opensTo',
-      opensTo,
+      read.text('opensTo'),
       'Does it open to the inside or the outside? Choose it above for the whole file, or enter it.',
     );
     return undefined;
   }
-  checkSide(read, context, size, kind, face, ligament, problems);
-  const ligamentMm = kind === 'embedded' ? (ligament ?? ligamentBySize(context, size)) : null;
-  if (kind === 'embedded' && !ligamentMm) {
-    problems.add(
-      'hold',
-      'ligament',
-      read.text('ligament'),
-      'An embedded flaw needs its ligament to the nearer surface, above 0 mm. Enter it, or call the flaw surface-breaking.',
-    );
-  }
+  if (kind === 'surface') checkSide(read, context, size, face, stated, problems);
+  const ligamentMm = readLigament(read, context, size, kind, stated, problems);
   return { kind, face, orientation, indicationType, ligamentMm };
 }
 
-const isNoSide = (cell: string): boolean => /^(|-|n\/?a|none|no)$/i.test(cell.trim());
+/** Depths are counted from the scan surface: a row seen from the other one would be assessed upside down. */
+function checkScanSurface(read: RowCells, context: ImportContext, problems: ProblemList): void {
+  const cell = read.text('scanSurface');
+  if (saysNothing(cell)) return;
+  const surface = readFace(cell);
+  if (surface === context.scanSurface) return;
+  problems.add(
+    'stop',
+    'scanSurface',
+    cell,
+    surface
+      ? `The row was scanned from the ${surface}, the inspection says from the ${context.scanSurface}: depths would be counted from the wrong face. Correct the cell, or the scan surface of the inspection.`
+      : `“${cell}” names no one scan surface. Depths are counted from it: enter inside (ID) or outside (OD).`,
+  );
+}
+
+/** A word that is not known is told, and counts as crack-like; only an empty cell takes the answer for the file. */
+function readType(read: RowCells, answers: ImportAnswers, problems: ProblemList) {
+  const cell = read.text('indicationType');
+  const known = readIndicationType(cell);
+  if (!known && !saysNothing(cell) && !readKind(cell)) {
+    problems.add(
+      'check',
+      'indicationType',
+      cell,
+      `“${cell}” names no known type: it is taken as unknown and counts as crack-like. Confirm, or enter the type.`,
+    );
+    return 'unknown';
+  }
+  const type = known ?? answers.indicationType ?? 'unknown';
+  if (type === 'unknown') {
+    problems.add(
+      'note',
+      'indicationType',
+      cell,
+      'The type is not known: it counts as crack-like until it is ruled out.',
+    );
+  }
+  return type;
+}
+
+function readSide(read: RowCells, problems: ProblemList): Face | undefined {
+  const cell = read.text('opensTo');
+  const side = readFace(cell);
+  if (!side && !saysNothing(cell)) {
+    problems.add(
+      'stop',
+      'opensTo',
+      cell,
+      `“${cell}” names no side. Enter inside (ID) or outside (OD).`,
+    );
+  }
+  return side;
+}
+
+function readPosition(
+  read: RowCells,
+  answers: ImportAnswers,
+  side: Face | undefined,
+  ligament: number | null,
+  problems: ProblemList,
+): FlawKind | undefined {
+  const cell = read.text('positionType');
+  const said = readKind(cell);
+  if (!said && !saysNothing(cell)) {
+    problems.add(
+      'stop',
+      'positionType',
+      cell,
+      `“${cell}” says neither surface nor embedded. Enter one of them; a flaw through the wall is not assessed from a file: report it at once.`,
+    );
+    return undefined;
+  }
+  const kind =
+    said ??
+    readKind(read.text('indicationType')) ??
+    (side ? 'surface' : ligament !== null && ligament > 0 ? 'embedded' : answers.kind);
+  if (!kind) {
+    problems.add(
+      'stop',
+      'positionType',
+      cell,
+      'Surface or embedded? It is not given; choose it above for the whole file, or enter it.',
+    );
+    return undefined;
+  }
+  return kind;
+}
 
 const opposite = (face: Face): Face => (face === 'inside' ? 'outside' : 'inside');
 
-/** Metal above the upper tip and below the lower one, seen from the scan surface. */
-function margins(context: ImportContext, size: Size | undefined) {
-  if (!size || size.depthToTopMm === null) return undefined;
-  const wall = size.wallMm ?? context.wallMm;
-  return { above: size.depthToTopMm, below: wall - size.depthToTopMm - size.heightMm };
-}
-
 function nearerFace(context: ImportContext, size: Size | undefined): Face {
-  const metal = margins(context, size);
+  const metal = marginsOf(context, size);
   if (!metal) return 'inside';
   return metal.above <= metal.below ? context.scanSurface : opposite(context.scanSurface);
-}
-
-function ligamentBySize(context: ImportContext, size: Size | undefined): number | null {
-  const metal = margins(context, size);
-  return metal ? Math.round(Math.max(0, Math.min(metal.above, metal.below)) * 100) / 100 : null;
 }
 
 /** The stated side must agree with the depths. */
@@ -112,12 +149,11 @@ function checkSide(
   read: RowCells,
   context: ImportContext,
   size: Size | undefined,
-  kind: 'surface' | 'embedded',
   face: Face,
   ligament: number | null,
   problems: ProblemList,
 ): void {
-  if (kind === 'surface' && ligament !== null && ligament > TOUCHING) {
+  if (ligament !== null && ligament > TOUCHING) {
     problems.add(
       'hold',
       'ligament',
@@ -125,8 +161,8 @@ function checkSide(
       `It is called surface-breaking, but has ${ligament} mm to the surface. Confirm, or call it embedded.`,
     );
   }
-  const metal = margins(context, size);
-  if (kind !== 'surface' || !metal) return;
+  const metal = marginsOf(context, size);
+  if (!metal) return;
   const gap = face === context.scanSurface ? metal.above : metal.below;
   if (gap > TOUCHING) {
     problems.add(

@@ -1,6 +1,7 @@
 import type { CandidateFinding, ImportContext } from './import-context';
 import type { RowCells } from './row-cells';
 import type { ProblemList } from './row-problem';
+import { depthTolerance } from './wall-margins';
 
 export type Size = Pick<
   CandidateFinding,
@@ -14,9 +15,6 @@ export type Size = Pick<
   | 'heightErrorMm'
   | 'lengthErrorMm'
 >;
-
-/** Allowed mismatch of depths and wall: 1 mm or 5 % of the wall; common practice. */
-const tolerance = (wall: number): number => Math.max(1, 0.05 * wall);
 
 /** How large the finding is, checked against the wall and against itself. */
 export function readSize(
@@ -91,12 +89,12 @@ export function readSize(
       read.text('height'),
       `Height ${height.mm} mm is not less than the wall of ${here} mm. Is it inches, another component, or a percentage?`,
     );
-  } else if (height && top && top.mm + height.mm > here + tolerance(here)) {
+  } else if (height && top && top.mm + height.mm > here + depthTolerance(here)) {
     problems.add(
       'hold',
       'depthToTop',
       read.text('depthToTop'),
-      `Depth ${top.mm} and height ${height.mm} mm exceed the wall of ${here} mm by ${round(top.mm + height.mm - here)} mm; ${round(tolerance(here))} mm is allowed. Confirm or correct.`,
+      `Depth ${top.mm} and height ${height.mm} mm exceed the wall of ${here} mm by ${round(top.mm + height.mm - here)} mm; ${round(depthTolerance(here))} mm is allowed. Confirm or correct.`,
     );
   }
   if (!length || length.mm === 0)

@@ -1,6 +1,6 @@
 import type { ImportAnswers, ImportContext } from './import-context';
 import { readRow, type RowReading } from './read-row';
-import type { ColumnMeaning } from './recognise-columns';
+import { meaningOfHeader, type ColumnMeaning } from './recognise-columns';
 import type { RowProblem } from './row-problem';
 
 /** A line of the file below its header. */
@@ -39,7 +39,7 @@ export function readTable(
     seen.set(line.cells.join('\u0001'), line.row);
     return againstNumbers(readRow(line.row, line.cells, columns, answers, context), numbers);
   });
-  return { rows, problems: missingColumns(columns) };
+  return { rows, problems: [...missingColumns(columns), ...secondColumns(columns)] };
 }
 
 const problem = (
@@ -116,4 +116,20 @@ function missingColumns(columns: readonly ColumnMeaning[]): RowProblem[] {
     );
   }
   return missing;
+}
+
+/** Columns left unread because another one is taken for the same. */
+function secondColumns(columns: readonly ColumnMeaning[]): RowProblem[] {
+  return columns.flatMap(({ field, header }) => {
+    const meant = field === null ? meaningOfHeader(header) : null;
+    const taken = meant && columns.find((each) => each.field === meant);
+    return taken
+      ? problem(
+          0,
+          'note',
+          `“${header}” is not read: “${taken.header}” is taken for the same. Map it below if it is the right one.`,
+          meant,
+        )
+      : [];
+  });
 }

@@ -23,6 +23,10 @@ export const readOrientation = reader<Orientation>([
   [/^(circ|circumferential|c|transverse|umfang)$/i, 'circumferential'],
 ]);
 
+/** Words said of the weld as well as of the vessel. */
+export const isWeldRelative = (cell: string): boolean =>
+  /^(longitudinal|long|längs|laengs|transverse)$/i.test(cell.trim());
+
 export const readIndicationType = reader<IndicationType>([
   [/crack|riss|fissure/i, 'crack'],
   [/lack of fusion|\blof\b|bindefehler/i, 'lack of fusion'],
@@ -34,3 +38,6 @@ export const readIndicationType = reader<IndicationType>([
   [/geometr/i, 'geometry'],
   [/^(unknown|\?+|unklar)$/i, 'unknown'],
 ]);
+
+/** A cell that is empty or says that nothing is given. */
+export const saysNothing = (cell: string): boolean => /^(|-+|n\/?a|none|no)$/i.test(cell.trim());

@@ -38,9 +38,13 @@ export function recogniseColumns(headers: readonly string[]): ColumnMeaning[] {
   });
 }
 
+/** What a header cell would mean if no other column were taken for it. */
+export const meaningOfHeader = (header: string): FieldName | null =>
+  meaningOf(splitUnit(header).words);
+
 /** How many cells of a line look like header words; used to find the header row. */
 export const headerScore = (cells: readonly string[]): number =>
-  cells.filter((cell) => meaningOf(splitUnit(cell).words) !== null).length;
+  cells.filter((cell) => meaningOfHeader(cell) !== null).length;
 
 function meaningOf(words: string): FieldName | null {
   if (words === '') return null;

@@ -1,7 +1,7 @@
 import type { FieldName } from './finding-fields';
 import type { ImportAnswers } from './import-context';
-import { readNumber, type NumberRead } from './read-number';
-import type { ColumnMeaning } from './recognise-columns';
+import { mayBeThousands, readNumber, type NumberRead } from './read-number';
+import type { ColumnMeaning, LengthUnit } from './recognise-columns';
 import type { ProblemList } from './row-problem';
 import { toMillimetres } from './to-millimetres';
 
@@ -20,11 +20,31 @@ export class RowCells {
     return column ? (this.cells[column.index] ?? '').trim() : '';
   }
 
+  /** Name of the field's column as the file gives it; empty when there is none. */
+  header(field: FieldName): string {
+    return this.columns.find((each) => each.field === field)?.header ?? '';
+  }
+
+  /** Unit of a field's column; null when its header names none. */
+  headerUnit(field: FieldName): LengthUnit | null {
+    return this.columns.find((each) => each.field === field)?.unit ?? null;
+  }
+
   /** A number as the file gives it, problems told; undefined when missing or unreadable. */
   number(field: FieldName): NumberRead | undefined {
     const cell = this.text(field);
     const result = readNumber(cell, this.answers.decimalMark);
-    if (result.state === 'number') return result.read;
+    if (result.state === 'number') {
+      if (mayBeThousands(cell, this.answers.decimalMark)) {
+        this.problems.add(
+          'hold',
+          field,
+          cell,
+          `“${cell}” is read as ${result.read.value}, its mark as one of thousands; it may be a decimal mark. Confirm, correct the cell, or choose the file’s decimal mark above.`,
+        );
+      }
+      return result.read;
+    }
     if (result.state === 'unreadable') {
       this.problems.add(
         'stop',
@@ -40,7 +60,7 @@ export class RowCells {
   length(field: FieldName): (NumberRead & { readonly mm: number }) | undefined {
     const read = this.number(field);
     if (!read) return undefined;
-    const headerUnit = this.columns.find((each) => each.field === field)?.unit ?? null;
+    const headerUnit = this.headerUnit(field);
     if (read.unit && headerUnit && read.unit !== headerUnit) {
       const words = `The cell says ${read.unit}, its column ${headerUnit}. The cell’s own unit is used; confirm or correct it.`;
       this.problems.add('hold', field, this.text(field), words);

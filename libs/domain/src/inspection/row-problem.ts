@@ -21,6 +21,8 @@ export class ProblemList {
   constructor(private readonly row: number) {}
 
   add(level: ProblemLevel, field: string | null, original: string, message: string): void {
+    // a cell read for two purposes has its problem told once
+    if (this.all.some((each) => each.field === field && each.message === message)) return;
     this.all.push({ row: this.row, field, original, level, message });
   }
 }

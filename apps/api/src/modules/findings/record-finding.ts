@@ -47,6 +47,13 @@ export async function recordFinding(
       ? await flawOfComponent(tx, component.siteId, component.id, target.flawId)
       : undefined;
   if (target.kind === 'continues' && !earlier) throw notFound('flaw');
+  if (earlier && earlier.locationId !== finding.locationId) {
+    throw unacceptable(
+      'finding.other-weld',
+      `Flaw ${earlier.number} does not lie in ${finding.locationName}: a finding continues a flaw of its own weld only.`,
+      'flaw',
+    );
+  }
   const flaw = earlier ?? (await openFlaw(tx, actor, now, component, finding));
   const { locationName: _name, ...values } = finding;
   const added = await findingRepository(tx).add({

@@ -101,12 +101,22 @@ const withoutRepeats = (earlier: readonly Correction[], later: readonly Correcti
     (each) => !later.some(({ row, column }) => row === each.row && column === each.column),
   );
 
+/**
+ * What was confirmed of a row, and that it is new, no longer holds once the row reads otherwise: one of its cells was
+ * corrected, or the mapping or an answer for the whole file changed.
+ */
 function decisionsOf(change: Change, record: ImportRecord) {
   const decided = change.decisions ?? [];
+  const wholeFile = change.mapping !== undefined || Object.keys(change.answers ?? {}).length > 0;
   const corrected = new Set(change.corrections?.map(({ row }) => row));
-  // what was confirmed of a row no longer holds once one of its cells is another
   const earlier = record.decisions
     .filter(({ row }) => !decided.some((each) => each.row === row))
-    .map((each) => (corrected.has(each.row) ? { ...each, confirmed: false } : each));
+    .map((each) => (wholeFile || corrected.has(each.row) ? askedAgain(each) : each));
   return [...earlier, ...decided];
 }
+
+const askedAgain = (decision: ImportRecord['decisions'][number]) => ({
+  ...decision,
+  confirmed: false,
+  flaw: decision.flaw?.kind === 'new' ? null : decision.flaw,
+});

@@ -43,7 +43,7 @@ export async function checkImport(
   const rows = table.rows.map((row, index) =>
     importRow(row, below[index]?.cells ?? [], record, candidatesFor(row.finding, known)),
   );
-  return { rows: refuseDoubleClaims(rows), problems: table.problems };
+  return { rows: refuseDoubleClaims(rows.map(refuseForeignFlaw)), problems: table.problems };
 }
 
 async function contextOf(
@@ -54,6 +54,7 @@ async function contextOf(
 ): Promise<ImportContext> {
   return {
     tag: component.tag,
+    reportNo: inspection.reportNo,
     wallMm: component.wallMm,
     insideDiameterMm: component.insideDiameterMm,
     locations: await locationsOf(db, component.id),
@@ -124,11 +125,11 @@ function importRow(
 ): ImportRow {
   const near = candidates.some(({ distanceMm }) => distanceMm === null || distanceMm <= NEAR_MM);
   const decided = record.decisions.find((each) => each.row === row);
-  const decision: ImportDecision = decided ?? {
+  const decision: ImportDecision = {
     row,
-    take: finding !== null || problems.some(({ level }) => level !== 'note'),
-    confirmed: false,
-    flaw: near ? null : { kind: 'new' },
+    take: decided?.take ?? (finding !== null || problems.some(({ level }) => level !== 'note')),
+    confirmed: decided?.confirmed ?? false,
+    flaw: decided?.flaw ?? (near ? null : { kind: 'new' }),
   };
   const toConfirm = problems.some(({ level }) => level === 'hold' || level === 'check');
   return {
@@ -143,6 +144,23 @@ function importRow(
   };
 }
 
+const stopped = (row: ImportRow, message: string): ImportRow => ({
+  ...row,
+  ready: false,
+  problems: [...row.problems, { row: row.row, field: null, original: '', level: 'stop', message }],
+});
+
+/** A row continues only a flaw of its own weld; a correction may have moved it to another. */
+function refuseForeignFlaw(row: ImportRow): ImportRow {
+  const { take, flaw } = row.decision;
+  if (!take || !row.finding || flaw?.kind !== 'continues') return row;
+  if (row.candidates.some(({ flawId }) => flawId === flaw.flawId)) return row;
+  return stopped(
+    row,
+    `The chosen flaw does not lie in ${row.finding.locationName}. Choose one that does, or call this one new.`,
+  );
+}
+
 /** Two rows of one file cannot both continue the same flaw. */
 function refuseDoubleClaims(rows: readonly ImportRow[]): ImportRow[] {
   const claimed = new Map<string, number>();
@@ -154,8 +172,9 @@ function refuseDoubleClaims(rows: readonly ImportRow[]): ImportRow[] {
       claimed.set(target.flawId, row.row);
       return row;
     }
-    const message = `Row ${earlier} continues the same flaw. Choose another, or call this one new.`;
-    const problem = { row: row.row, field: null, original: '', level: 'stop' as const, message };
-    return { ...row, ready: false, problems: [...row.problems, problem] };
+    return stopped(
+      row,
+      `Row ${earlier} continues the same flaw. Choose another, or call this one new.`,
+    );
   });
 }

@@ -7,6 +7,7 @@ import { conflict, Failure, forbidden, notFound, staleVersion } from '../../http
 import { signerOf } from '../history/signer-of';
 import { writeHistory } from '../history/write-history';
 import { completeReinspections } from '../reinspections/complete-reinspections';
+import { reopenReinspections } from '../reinspections/reopen-reinspections';
 import { inspectionRepository, type InspectionRecord } from './inspection.repository';
 import { readInspectionView } from './inspection-view';
 import { missingForSubmission } from './missing-for-submission';
@@ -77,6 +78,9 @@ export function moveInspection(
       reason,
       eventOn: after.inspectedOn,
     });
+    if (move === 'void') {
+      await reopenReinspections(tx, actor, now, { inspectionId: id, reportNo: after.reportNo });
+    }
     if (move === 'accept') {
       const flawIds = (await repository.flawsFound(id)).map(({ flawId }) => flawId);
       await completeReinspections(tx, actor, now, {

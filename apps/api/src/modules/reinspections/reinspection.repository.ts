@@ -1,4 +1,4 @@
-import { reinspections, reminders } from '@ligament/domain/schema/schedule';
+import { outgoingMails, reinspections, reminders } from '@ligament/domain/schema/schedule';
 import { and, eq, inArray, isNull, notInArray, or, sql } from 'drizzle-orm';
 import type { Database } from '../../db/database';
 
@@ -60,6 +60,16 @@ export const reinspectionRepository = (db: Database) => ({
       .where(and(eq(reinspections.componentId, componentId), about, stillOpen));
   },
 
+  /** Tasks that an inspection fulfilled. */
+  doneBy(inspectionId: string): Promise<ReinspectionRecord[]> {
+    return db
+      .select()
+      .from(reinspections)
+      .where(
+        and(eq(reinspections.doneInspectionId, inspectionId), eq(reinspections.state, 'done')),
+      );
+  },
+
   async setState(
     id: string,
     state: ReinspectionRecord['state'],
@@ -78,5 +88,26 @@ export const reinspectionRepository = (db: Database) => ({
       .update(reminders)
       .set({ state: 'cancelled' })
       .where(and(eq(reminders.reinspectionId, id), eq(reminders.state, 'queued')));
+  },
+
+  /** Reminders of a due date that were stopped before they were sent are to be sent after all. */
+  async queueCancelledReminders(id: string, dueOn: string, now: Date): Promise<void> {
+    const again = await db
+      .update(reminders)
+      .set({ state: 'queued' })
+      .where(
+        and(
+          eq(reminders.reinspectionId, id),
+          eq(reminders.dueOn, dueOn),
+          eq(reminders.state, 'cancelled'),
+        ),
+      )
+      .returning({ mailId: reminders.mailId });
+    const mails = again.flatMap(({ mailId }) => mailId ?? []);
+    if (mails.length === 0) return;
+    await db
+      .update(outgoingMails)
+      .set({ state: 'queued', nextAttemptAt: now, lastError: '' })
+      .where(inArray(outgoingMails.id, mails));
   },
 });
