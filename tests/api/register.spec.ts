@@ -241,7 +241,17 @@ describe('the register', () => {
       column: 'wall_mm',
       original: 'thick',
     });
-    expect(bad.body.rows[2].problems[0].message).toContain('Use one of: vessel shell');
+    expect(bad.body.rows[2].problems[0].message).toMatch(
+      /^“tank” is not one of the words known here\. Use one of: vessel shell/,
+    );
+    const gaps = await send(['', row('T-8'), '', row('T-9', 'thick'), row('t-8')]);
+    expect(
+      gaps.body.rows.map((each: { row: number; state: string }) => [each.row, each.state]),
+    ).toEqual([
+      [3, 'new'],
+      [5, 'cannot be taken'],
+      [6, 'cannot be taken'],
+    ]);
     const refused = await engineer
       .post('/api/register-imports/commit')
       .send({ fileName: 'register.csv', csv: bad.body.csv });
@@ -252,11 +262,38 @@ describe('the register', () => {
       .post('/api/register-imports/commit')
       .send({ fileName: 'register.csv', csv: good.body.csv });
     expect([added.status, added.body.added]).toEqual([201, ['T-1', 'T-2']]);
-    const again = await send([row('T-1'), row('T-4')]);
+    const again = await send([row('t-1'), row('T-4')]);
     expect(again.body.rows.map((each: { state: string }) => each.state)).toEqual([
       'already in the register',
       'new',
     ]);
+  });
+
+  it('keeps one record of a vessel, however its tag is spelled', async () => {
+    const parts = await makeParts();
+    const engineer = as(plant.app, plant.engineer);
+    expect((await engineer.post('/api/components').send(component(parts, 'QQ-1'))).status).toBe(
+      201,
+    );
+    const again = await engineer.post('/api/components').send(component(parts, 'qq-1'));
+    expect([again.status, again.body.errors[0].field]).toEqual([409, 'tag']);
+  });
+
+  it('takes the two pieces of a growth law in their order only', async () => {
+    const engineer = as(plant.app, plant.engineer);
+    const steep = { coefficient: 4.37e-26, exponent: 8.16 };
+    const flat = { coefficient: 1.29e-12, exponent: 2.88 };
+    const law = (key: string, stages: object[]) => ({
+      ...{ key, title: 'Invented', environment: 'air', thresholdMpaSqrtMm: 63, source: 'Test' },
+      stages,
+    });
+    const swapped = await engineer.post('/api/growth-laws').send(law('swapped', [flat, steep]));
+    expect([swapped.status, swapped.body.errors[0].message]).toEqual([
+      400,
+      expect.stringContaining('has to be the steeper one'),
+    ]);
+    const right = await engineer.post('/api/growth-laws').send(law('right', [steep, flat]));
+    expect(right.status).toBe(201);
   });
 
   it('lets only engineers and administrators write', async () => {

@@ -26,12 +26,25 @@ const twoStagesMeet = (law: { stages?: readonly z.infer<typeof stage>[] }) => {
   const at = first.exponent === second.exponent ? NaN : meetingPoint(first, second);
   return Number.isFinite(at) && at > 1 && at < 1e5;
 };
+// a bend the other way would be two pieces in the wrong order, and grow too slowly in the middle
+const steeperFirst = (law: { stages?: readonly z.infer<typeof stage>[] }) => {
+  const [first, second] = law.stages ?? [];
+  return !first || !second || first.exponent > second.exponent;
+};
+const upwards = {
+  error:
+    'The first piece, below the meeting point, has to be the steeper one. Exchange the pieces; a law that steepens upward is entered as one piece that lies above it.',
+  path: ['stages'],
+};
 const apart = {
   error: 'The two pieces do not meet at a ΔK between 1 and 100 000 MPa√mm.',
   path: ['stages'],
 };
 
-export const growthLawBody = z.strictObject(fields).refine(twoStagesMeet, apart);
+export const growthLawBody = z
+  .strictObject(fields)
+  .refine(steeperFirst, upwards)
+  .refine(twoStagesMeet, apart);
 export const growthLawView = z.object({ ...fields, id, version });
 export type GrowthLawView = z.infer<typeof growthLawView>;
 
@@ -64,6 +77,7 @@ export const changeGrowthLaw = route({
     .omit({ key: true })
     .partial()
     .extend({ reason })
+    .refine(steeperFirst, upwards)
     .refine(twoStagesMeet, apart),
   response: growthLawView,
 });

@@ -1,3 +1,4 @@
+import { sql } from 'drizzle-orm';
 import {
   date,
   doublePrecision,
@@ -6,6 +7,7 @@ import {
   pgTable,
   text,
   unique,
+  uniqueIndex,
   uuid,
 } from 'drizzle-orm/pg-core';
 import {
@@ -64,7 +66,8 @@ export const components = pgTable(
     updatedAt: updatedAt(),
   },
   (t) => [
-    unique('components_tag').on(t.siteId, t.tag),
+    // one vessel has one record, however its tag is spelled
+    uniqueIndex('components_tag').on(t.siteId, sql`lower(${t.tag})`),
     index('components_unit').on(t.unitId),
     oneOf('components_kind', t.kind, COMPONENT_KINDS),
     oneOf('components_state', t.state, COMPONENT_STATES),

@@ -8,6 +8,7 @@ import { plainHeader, REGISTER_COLUMNS, type RegisterColumn } from './register-c
 export interface RegisterNames {
   readonly units: ReadonlyMap<string, string>;
   readonly materials: ReadonlyMap<string, string>;
+  /** Tags already in the register, as `plainTag` spells them. */
   readonly tags: ReadonlySet<string>;
 }
 
@@ -22,8 +23,7 @@ const MOST_ROWS = 2000;
 
 /** Reads a register table and checks every row by the contract of a component. */
 export function readRegister(csv: string, names: RegisterNames): RegisterRead {
-  const { data } = Papa.parse<string[]>(csv, { skipEmptyLines: 'greedy', preview: MOST_ROWS + 2 });
-  const [headers = [], ...lines] = data;
+  const [{ cells: headers } = { cells: [] }, ...lines] = linesOf(csv);
   const missing = REGISTER_COLUMNS.filter(
     ({ header, optional }) => !optional && !headers.map(plainHeader).includes(header),
   );
@@ -35,7 +35,7 @@ export function readRegister(csv: string, names: RegisterNames): RegisterRead {
   const read =
     problems.length > 0
       ? []
-      : lines.map((cells, index) => readLine(cells, index + 2, headers, names, seen));
+      : lines.map(({ cells, row }) => readLine(cells, row, headers, names, seen));
   const known = new Set(REGISTER_COLUMNS.map(({ header }) => header));
   return {
     preview: {
@@ -46,6 +46,26 @@ export function readRegister(csv: string, names: RegisterNames): RegisterRead {
     components: read.flatMap(({ component }) => component ?? []),
   };
 }
+
+interface Line {
+  /** Line of the file at which it starts, counted from 1. */
+  readonly row: number;
+  readonly cells: readonly string[];
+}
+
+/** The lines of a table that hold something, each with its number: blank lines and line breaks in cells are counted. */
+function linesOf(csv: string): Line[] {
+  let row = 1;
+  const lines: Line[] = [];
+  for (const cells of Papa.parse<string[]>(csv).data) {
+    if (cells.some((cell) => cell.trim() !== '')) lines.push({ row, cells });
+    row += 1 + cells.join('').split(/\r\n|\r|\n/).length - 1;
+  }
+  return lines;
+}
+
+/** A tag in the spelling by which two are the same. */
+export const plainTag = (tag: string): string => tag.toLowerCase();
 
 function readLine(
   cells: readonly string[],
@@ -65,16 +85,16 @@ function readLine(
   );
   const tag = cell('tag');
   const shown = { row, tag, description: cell('description') };
-  if (names.tags.has(tag))
+  if (names.tags.has(plainTag(tag)))
     return { row: { ...shown, state: 'already in the register', problems: [] } };
-  if (seen.has(tag))
+  if (seen.has(plainTag(tag)))
     problems.push({
       row,
       column: 'tag',
       original: tag,
       message: 'This tag stands in an earlier row of the file.',
     });
-  seen.add(tag);
+  seen.add(plainTag(tag));
   const parsed = componentBody.safeParse(values);
   if (!parsed.success) {
     for (const issue of parsed.error.issues) {
@@ -84,7 +104,9 @@ function readLine(
           row,
           column,
           original: cell(column),
-          message: `${issue.message}${choices(column)}`,
+          message: issue.message.includes('expected one of')
+            ? `“${cell(column)}” is not one of the words known here.${choices(column)}`
+            : issue.message,
         });
       }
     }

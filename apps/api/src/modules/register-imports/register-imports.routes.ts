@@ -7,6 +7,7 @@ import { decodeText } from '@ligament/domain/inspection/decode-text';
 import type { Deps } from '../../deps';
 import { answerCsv } from '../../http/csv-answer';
 import { Failure, unacceptable } from '../../http/failure';
+import { refuseRepeat } from '../../http/refuse-repeat';
 import type { Api } from '../../http/serve';
 import { receivedFile, receiveFile } from '../../http/upload';
 import { insertComponent } from '../components/add-component';
@@ -45,35 +46,44 @@ export function serveRegisterImports(api: Api, { db, clock, config }: Deps): voi
     receiveFile(config.uploadBytes),
   );
 
+  const taken = 'Somebody else has just added one of these components. Read the file again.';
   api.serve(commitRegister, ({ actor, body }) =>
-    db.transaction(async (tx) => {
-      const { preview, components } = readRegister(body.csv, await registerNames(tx, actor.siteId));
-      const errors = [
-        ...preview.problems.map((message) => ({ field: 'file', message })),
-        ...preview.rows.flatMap(({ problems }) =>
-          problems.map(({ row, column, message }) => ({ field: `row ${row}, ${column}`, message })),
-        ),
-      ];
-      if (errors.length > 0 || components.length === 0) {
-        throw new Failure(
-          'register-import.not-ready',
-          422,
-          'Not ready to add',
-          errors.length > 0
-            ? 'Some rows cannot be taken; nothing was added.'
-            : 'No row is new; nothing was added.',
-          { errors },
+    refuseRepeat('components_tag', 'tag', taken, () =>
+      db.transaction(async (tx) => {
+        const { preview, components } = readRegister(
+          body.csv,
+          await registerNames(tx, actor.siteId),
         );
-      }
-      const now = clock.now();
-      for (const component of components) await insertComponent(tx, actor, now, component);
-      return {
-        added: components.map(({ tag }) => tag),
-        leftAlone: preview.rows
-          .filter(({ state }) => state === 'already in the register')
-          .map(({ tag }) => tag),
-      };
-    }),
+        const errors = [
+          ...preview.problems.map((message) => ({ field: 'file', message })),
+          ...preview.rows.flatMap(({ problems }) =>
+            problems.map(({ row, column, message }) => ({
+              field: `row ${row}, ${column}`,
+              message,
+            })),
+          ),
+        ];
+        if (errors.length > 0 || components.length === 0) {
+          throw new Failure(
+            'register-import.not-ready',
+            422,
+            'Not ready to add',
+            errors.length > 0
+              ? 'Some rows cannot be taken; nothing was added.'
+              : 'No row is new; nothing was added.',
+            { errors },
+          );
+        }
+        const now = clock.now();
+        for (const component of components) await insertComponent(tx, actor, now, component);
+        return {
+          added: components.map(({ tag }) => tag),
+          leftAlone: preview.rows
+            .filter(({ state }) => state === 'already in the register')
+            .map(({ tag }) => tag),
+        };
+      }),
+    ),
   );
 
   api.stream(registerTemplate, async ({ response }) => {

@@ -3,7 +3,7 @@ import { materials } from '@ligament/domain/schema/materials';
 import { units } from '@ligament/domain/schema/sites';
 import { eq } from 'drizzle-orm';
 import type { Database } from '../../db/database';
-import type { RegisterNames } from './read-register';
+import { plainTag, type RegisterNames } from './read-register';
 
 /** Names that a register table of a site may refer to. */
 export async function registerNames(db: Database, siteId: string): Promise<RegisterNames> {
@@ -22,6 +22,6 @@ export async function registerNames(db: Database, siteId: string): Promise<Regis
   return {
     units: new Map(unitRows.map(({ code, id }) => [code, id])),
     materials: new Map(materialRows.map(({ name, id }) => [name, id])),
-    tags: new Set(tagRows.map(({ tag }) => tag)),
+    tags: new Set(tagRows.map(({ tag }) => plainTag(tag))),
   };
 }

@@ -19,7 +19,7 @@ import type { BodyOf } from '@ligament/domain/contract/route';
 import { BehaviorSubject, switchMap } from 'rxjs';
 import { ApiClient } from '../../core/http/api-client';
 import { loadable, LOADING, valueOf } from '../../core/http/loadable';
-import { type Problem, problemOf } from '../../core/http/problem';
+import { type Problem, problemOf, versionAfter } from '../../core/http/problem';
 import { Session } from '../../core/session/session';
 import { Chart } from '../../shared/chart/chart';
 import { Drawing } from '../../shared/drawing/drawing';
@@ -56,6 +56,8 @@ export class GrowthLawList {
   protected readonly session = inject(Session);
   protected readonly checks = LAW_CHECKS;
   protected readonly problem = signal<Problem | null>(null);
+  /** Version shown by a refusal, newer than the one read. */
+  private readonly newer = signal<number | null>(null);
   /** The law whose form is open; null for a new one. */
   protected readonly open = signal<GrowthLawView | null | undefined>(undefined);
 
@@ -81,6 +83,7 @@ export class GrowthLawList {
 
   protected edit(law: GrowthLawView | null | undefined): void {
     this.problem.set(null);
+    this.newer.set(null);
     this.open.set(law);
   }
 
@@ -89,15 +92,25 @@ export class GrowthLawList {
     // every field has passed the contract's check in the form
     const body = lawBodyOf(value) as BodyOf<typeof addGrowthLaw> & { readonly reason: string };
     const saved = law
-      ? this.api.call(changeGrowthLaw, { params: { id: law.id }, version: law.version, body })
+      ? this.api.call(changeGrowthLaw, {
+          params: { id: law.id },
+          version: this.newer() ?? law.version,
+          body,
+        })
       : this.api.call(addGrowthLaw, { body });
     saved.subscribe({
       next: () => {
         this.edit(undefined);
         this.again();
       },
-      error: (error: unknown) => this.problem.set(problemOf(error)),
+      error: (error: unknown) => this.refused(problemOf(error)),
     });
+  }
+
+  private refused(problem: Problem): void {
+    this.newer.update((seen) => versionAfter(problem, seen));
+    const current = problem.current as GrowthLawView | undefined;
+    this.problem.set(current ? { ...problem, current: formValueOf(current) } : problem);
   }
 
   protected again(): void {

@@ -6,9 +6,9 @@ const stage = growthLawBody.shape.stages.element.shape;
 
 const PIECES: readonly RecordField[] = [
   number('coefficient1', 'A of the first piece, mm/cycle with ΔK in MPa√mm'),
-  number('exponent1', 'm of the first piece'),
-  number('coefficient2', 'A of the second piece (empty: one piece only)'),
-  number('exponent2', 'm of the second piece'),
+  number('exponent1', 'm of the first piece, which holds below the meeting point'),
+  number('coefficient2', 'A of the second piece, which holds above it (empty: one piece only)'),
+  number('exponent2', 'm of the second piece, smaller than the first'),
   number('thresholdMpaSqrtMm', 'Threshold, MPa√mm'),
 ];
 

@@ -70,7 +70,19 @@ describe('MaterialForm', () => {
       reason: 'The certificate was found.',
     });
     expect(Object.keys(sent.request.body as object)).not.toContain('version');
-    sent.flush({ ...MATERIAL, version: 5 });
+    // somebody else was faster: told, and the second save goes on top of theirs
+    const current = { ...MATERIAL, version: 5, tensileMpa: 505 };
+    sent.flush(
+      { type: 'urn:ligament:stale', title: 'Changed', detail: 'Meanwhile.', current },
+      { status: 412, statusText: 'Precondition Failed' },
+    );
+    await harness.fixture.whenStable();
+    expect(page.querySelector('[role=alert]')?.textContent).toContain('510 → 505');
+    page.querySelector<HTMLButtonElement>('button[type=submit]')?.click();
+    const again = server.expectOne({ method: 'PATCH', url: '/api/materials/m1' });
+    expect(again.request.headers.get('If-Match')).toBe('"5"');
+    expect(again.request.body).toMatchObject({ tensileMpa: 505 });
+    again.flush({ ...current, version: 6 });
     await harness.fixture.whenStable();
     expect(TestBed.inject(Router).url).toBe('/materials/m1');
   });

@@ -4,7 +4,7 @@ import { Router } from '@angular/router';
 import { type MaterialBody, materialBody } from '@ligament/domain/contract/materials';
 import { of, switchMap } from 'rxjs';
 import { loadable, LOADING } from '../../core/http/loadable';
-import { type Problem, problemOf } from '../../core/http/problem';
+import { type Problem, problemOf, versionAfter } from '../../core/http/problem';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { ProblemNotice } from '../../shared/problem/problem-notice';
 import { RecordForm } from '../../shared/record-form/record-form';
@@ -62,6 +62,8 @@ export class MaterialForm {
   protected readonly fields = MATERIAL_FIELDS;
   protected readonly checks = materialBody.shape;
   protected readonly problem = signal<Problem | null>(null);
+  /** Version shown by a refusal, newer than the one read. */
+  private readonly newer = signal<number | null>(null);
   protected readonly loaded = toSignal(
     toObservable(this.id).pipe(switchMap((id) => loadable(id ? this.client.read(id) : of(null)))),
     { initialValue: LOADING },
@@ -76,12 +78,17 @@ export class MaterialForm {
     const body = value as MaterialBody & { readonly reason: string };
     const material = this.material();
     const saved = material
-      ? this.client.change(material.id, material.version, body)
+      ? this.client.change(material.id, this.newer() ?? material.version, body)
       : this.client.add(body);
     saved.subscribe({
       next: ({ id }) => this.leave(id),
-      error: (error: unknown) => this.problem.set(problemOf(error)),
+      error: (error: unknown) => this.refused(problemOf(error)),
     });
+  }
+
+  private refused(problem: Problem): void {
+    this.newer.update((seen) => versionAfter(problem, seen));
+    this.problem.set(problem);
   }
 
   protected leave(id: string | undefined): void {

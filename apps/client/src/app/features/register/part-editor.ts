@@ -10,9 +10,10 @@ import {
 import type { ComponentView } from '@ligament/domain/contract/components';
 import type { Observable } from 'rxjs';
 import { ApiClient } from '../../core/http/api-client';
-import { type Problem, problemOf } from '../../core/http/problem';
+import { type Problem, problemOf, versionAfter } from '../../core/http/problem';
 import { RecordForm } from '../../shared/record-form/record-form';
 import type { RecordValue } from '../../shared/record-form/record-group';
+import { fillFromPressure } from './fill-from-pressure';
 import { type Part, PART_CHECKS, PART_ROUTES, partFields, type PartKind } from './part-kinds';
 
 /** The form of one location, load case or operating cycle. */
@@ -27,6 +28,7 @@ import { type Part, PART_CHECKS, PART_ROUTES, partFields, type PartKind } from '
       [start]="part() ?? {}"
       [asksReason]="part() !== null"
       [problem]="problem()"
+      [fill]="fill()"
       (saved)="save($event)"
       (cancelled)="cancelled.emit()"
     />
@@ -42,8 +44,13 @@ export class PartEditor {
   readonly cancelled = output();
   private readonly api = inject(ApiClient);
   protected readonly problem = signal<Problem | null>(null);
+  /** Version shown by a refusal, newer than the one read. */
+  private readonly newer = signal<number | null>(null);
   protected readonly fields = computed(() => partFields(this.kind(), this.component()));
   protected readonly checks = computed(() => PART_CHECKS[this.kind()]);
+  protected readonly fill = computed(() =>
+    this.kind() === 'load case' ? fillFromPressure(this.component()) : null,
+  );
   protected readonly article = computed(() =>
     this.kind() === 'operating cycle' ? 'an operating cycle' : `a ${this.kind()}`,
   );
@@ -51,8 +58,13 @@ export class PartEditor {
   protected save(value: RecordValue): void {
     this.send(value).subscribe({
       next: () => this.saved.emit(),
-      error: (error: unknown) => this.problem.set(problemOf(error)),
+      error: (error: unknown) => this.refused(problemOf(error)),
     });
+  }
+
+  private refused(problem: Problem): void {
+    this.newer.update((seen) => versionAfter(problem, seen));
+    this.problem.set(problem);
   }
 
   private send(value: RecordValue): Observable<unknown> {
@@ -61,7 +73,11 @@ export class PartEditor {
     const body = value as never;
     const routes = PART_ROUTES[this.kind()];
     return part
-      ? this.api.call(routes.change, { params: { id: part.id }, version: part.version, body })
+      ? this.api.call(routes.change, {
+          params: { id: part.id },
+          version: this.newer() ?? part.version,
+          body,
+        })
       : this.api.call(routes.add, { params: { id: this.component().id }, body });
   }
 }

@@ -116,6 +116,45 @@ describe('RecordForm', () => {
     expect(field('Name').value).toBe('A516-70');
   });
 
+  it('takes over what somebody else changed, keeps what was typed, and tells both', async () => {
+    const start = { name: 'A516-70', kind: 'plate', yieldMpa: 285, since: '2012-10-01' };
+    await open({ start, asksReason: true });
+    type('Yield, MPa', '290');
+    const current = { ...start, yieldMpa: 280, kind: 'pipe', version: 5 };
+    const problem = { title: 'Changed', detail: 'Meanwhile.', errors: [], current };
+    fixture.componentRef.setInput('problem', problem);
+    await fixture.whenStable();
+    const told = [...page.querySelectorAll('[role=alert] li')].map((each) =>
+      each.textContent?.replaceAll(/\s+/g, ' ').trim(),
+    );
+    expect(told).toEqual([
+      'Kind: plate → pipe. Taken over into this form.',
+      'Yield, MPa: 285 → 280. Your entry 290 is kept.',
+    ]);
+    type('Reason for the change', 'Second certificate');
+    await send();
+    expect(saved[0]).toMatchObject({ name: 'A516-70', kind: 'pipe', yieldMpa: 290 });
+  });
+
+  it('fills fields from others, and says why it cannot', async () => {
+    const fill = {
+      label: 'From the name',
+      values: ({ name }: RecordValue) => (name === '' ? 'Enter a name.' : { yieldMpa: 42 }),
+    };
+    await open({ fill });
+    const press = async () => {
+      [...page.querySelectorAll('button')]
+        .find((each) => each.textContent === 'From the name')
+        ?.click();
+      await fixture.whenStable();
+    };
+    await press();
+    expect(page.querySelector('[role=status]')?.textContent).toBe('Enter a name.');
+    type('Name', 'A');
+    await press();
+    expect(field('Yield, MPa').value).toBe('42');
+  });
+
   it('can be left without saving', async () => {
     await open();
     let left = 0;

@@ -4,7 +4,9 @@ import {
   computed,
   effect,
   input,
+  linkedSignal,
   output,
+  signal,
   untracked,
 } from '@angular/core';
 import { ReactiveFormsModule } from '@angular/forms';
@@ -13,13 +15,23 @@ import { PROVENANCES } from '@ligament/domain/units/provenance';
 import { ProblemNotice } from '../problem/problem-notice';
 import { FieldError } from '../validation/field-error';
 import { showProblemOnForm } from '../validation/show-problem-on-form';
-import type { RecordField } from './record-field';
+import { type ChangedMeanwhile, mergeMeanwhile } from './merge-meanwhile';
+import type { FieldValue, RecordField } from './record-field';
 import { type Checks, recordGroup, type RecordValue, recordValue } from './record-group';
 
 interface ShownProblem {
   readonly title: string;
   readonly detail: string;
   readonly errors: readonly { readonly field: string; readonly message: string }[];
+  /** The record as it stands now, when somebody else changed it meanwhile. */
+  readonly current?: unknown;
+}
+
+/** Fills fields from what others hold, e.g. stresses from a pressure. */
+export interface RecordFill {
+  readonly label: string;
+  /** New values by field, or the reason why there are none. */
+  readonly values: (held: RecordValue) => Readonly<Record<string, FieldValue>> | string;
 }
 
 let forms = 0;
@@ -52,6 +64,8 @@ export class RecordForm {
   /** A change of something recorded says why. */
   readonly asksReason = input(false);
   readonly problem = input<ShownProblem | null>(null);
+  /** Offered beside the fields where some follow from others. */
+  readonly fill = input<RecordFill | null>(null);
   /** The body for the contract; every field has passed its check. */
   readonly saved = output<RecordValue>();
   readonly cancelled = output();
@@ -62,11 +76,42 @@ export class RecordForm {
     recordGroup(this.fields(), this.checks(), this.start(), this.asksReason()),
   );
 
+  /** The form as last read from the record, to tell what changed meanwhile. */
+  private readonly base = linkedSignal(() => this.formOf(this.start()));
+  protected readonly meanwhile = signal<readonly ChangedMeanwhile[]>([]);
+  protected readonly filled = signal('');
+
   constructor() {
     effect(() => {
       const problem = this.problem();
-      if (problem) untracked(() => showProblemOnForm(this.group(), problem));
+      untracked(() => (problem ? this.show(problem) : this.meanwhile.set([])));
     });
+  }
+
+  private show(problem: ShownProblem): void {
+    showProblemOnForm(this.group(), problem);
+    if (problem.current === null || typeof problem.current !== 'object') return;
+    const theirs = this.formOf(problem.current as RecordValue);
+    this.meanwhile.set(mergeMeanwhile(this.fields(), this.group(), this.base(), theirs));
+    this.base.set(theirs);
+  }
+
+  private formOf(record: RecordValue) {
+    return recordGroup(this.fields(), this.checks(), record, this.asksReason());
+  }
+
+  protected fillIn(fill: RecordFill): void {
+    const group = this.group();
+    const values = fill.values(recordValue(this.fields(), group));
+    if (typeof values === 'string') {
+      this.filled.set(values);
+      return;
+    }
+    for (const [name, value] of Object.entries(values)) {
+      group.controls[name]?.setValue(value);
+      group.controls[name]?.markAsDirty();
+    }
+    this.filled.set('Filled in. Look at the values before you save.');
   }
 
   protected save(): void {

@@ -1,0 +1,2 @@
+ALTER TABLE "components" DROP CONSTRAINT "components_tag";--> statement-breakpoint
+CREATE UNIQUE INDEX "components_tag" ON "components" USING btree ("site_id",lower("tag"));
