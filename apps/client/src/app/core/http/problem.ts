@@ -46,16 +46,6 @@ export function problemOf(error: unknown): Problem {
   };
 }
 
-/**
- * Version to save on: that of the record as somebody else left it, once a refusal has shown it, else the one seen
- * before. So a second save goes on top of what the person has been told.
- */
-export function versionAfter(problem: Problem, seen: number | null): number | null {
-  const { current } = problem;
-  const newer = current !== null && typeof current === 'object' && 'version' in current;
-  return newer && typeof current.version === 'number' ? current.version : seen;
-}
-
 function detailsOf(error: HttpErrorResponse): Partial<ProblemDetails> {
   const body: unknown = error.error;
   if (body !== null && typeof body === 'object') return body as Partial<ProblemDetails>;

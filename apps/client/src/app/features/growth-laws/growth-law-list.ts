@@ -19,14 +19,13 @@ import type { BodyOf } from '@ligament/domain/contract/route';
 import { BehaviorSubject, switchMap } from 'rxjs';
 import { ApiClient } from '../../core/http/api-client';
 import { loadable, LOADING, valueOf } from '../../core/http/loadable';
-import { type Problem, problemOf, versionAfter } from '../../core/http/problem';
+import { type Problem, problemOf } from '../../core/http/problem';
 import { Session } from '../../core/session/session';
 import { Chart } from '../../shared/chart/chart';
 import { Drawing } from '../../shared/drawing/drawing';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { QuantityPipe } from '../../shared/quantity/quantity-pipe';
-import { RecordForm } from '../../shared/record-form/record-form';
-import type { RecordValue } from '../../shared/record-form/record-group';
+import { RecordForm, type SavedRecord } from '../../shared/record-form/record-form';
 import { EmptyState } from '../../shared/states/empty-state';
 import { FailedState } from '../../shared/states/failed-state';
 import { LoadingState } from '../../shared/states/loading-state';
@@ -56,8 +55,6 @@ export class GrowthLawList {
   protected readonly session = inject(Session);
   protected readonly checks = LAW_CHECKS;
   protected readonly problem = signal<Problem | null>(null);
-  /** Version shown by a refusal, newer than the one read. */
-  private readonly newer = signal<number | null>(null);
   /** The law whose form is open; null for a new one. */
   protected readonly open = signal<GrowthLawView | null | undefined>(undefined);
 
@@ -83,18 +80,17 @@ export class GrowthLawList {
 
   protected edit(law: GrowthLawView | null | undefined): void {
     this.problem.set(null);
-    this.newer.set(null);
     this.open.set(law);
   }
 
-  protected save(value: RecordValue): void {
+  protected save({ value, version }: SavedRecord): void {
     const law = this.open();
     // every field has passed the contract's check in the form
     const body = lawBodyOf(value) as BodyOf<typeof addGrowthLaw> & { readonly reason: string };
     const saved = law
       ? this.api.call(changeGrowthLaw, {
           params: { id: law.id },
-          version: this.newer() ?? law.version,
+          version: version,
           body,
         })
       : this.api.call(addGrowthLaw, { body });
@@ -107,8 +103,8 @@ export class GrowthLawList {
     });
   }
 
+  /** A law as it stands now is shown piece by piece, as its form holds it. */
   private refused(problem: Problem): void {
-    this.newer.update((seen) => versionAfter(problem, seen));
     const current = problem.current as GrowthLawView | undefined;
     this.problem.set(current ? { ...problem, current: formValueOf(current) } : problem);
   }

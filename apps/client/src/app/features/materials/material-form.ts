@@ -4,11 +4,10 @@ import { Router } from '@angular/router';
 import { type MaterialBody, materialBody } from '@ligament/domain/contract/materials';
 import { of, switchMap } from 'rxjs';
 import { loadable, LOADING } from '../../core/http/loadable';
-import { type Problem, problemOf, versionAfter } from '../../core/http/problem';
+import { type Problem, problemOf } from '../../core/http/problem';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { ProblemNotice } from '../../shared/problem/problem-notice';
-import { RecordForm } from '../../shared/record-form/record-form';
-import type { RecordValue } from '../../shared/record-form/record-group';
+import { RecordForm, type SavedRecord } from '../../shared/record-form/record-form';
 import { LoadingState } from '../../shared/states/loading-state';
 import { MATERIAL_FIELDS } from './material-properties';
 import { MaterialsClient } from './materials-client';
@@ -62,8 +61,6 @@ export class MaterialForm {
   protected readonly fields = MATERIAL_FIELDS;
   protected readonly checks = materialBody.shape;
   protected readonly problem = signal<Problem | null>(null);
-  /** Version shown by a refusal, newer than the one read. */
-  private readonly newer = signal<number | null>(null);
   protected readonly loaded = toSignal(
     toObservable(this.id).pipe(switchMap((id) => loadable(id ? this.client.read(id) : of(null)))),
     { initialValue: LOADING },
@@ -73,22 +70,15 @@ export class MaterialForm {
     return loaded.state === 'ready' ? loaded.value : null;
   });
 
-  protected save(value: RecordValue): void {
+  protected save({ value, version }: SavedRecord): void {
     // every field has passed the contract's check in the form
     const body = value as MaterialBody & { readonly reason: string };
     const material = this.material();
-    const saved = material
-      ? this.client.change(material.id, this.newer() ?? material.version, body)
-      : this.client.add(body);
+    const saved = material ? this.client.change(material.id, version, body) : this.client.add(body);
     saved.subscribe({
       next: ({ id }) => this.leave(id),
-      error: (error: unknown) => this.refused(problemOf(error)),
+      error: (error: unknown) => this.problem.set(problemOf(error)),
     });
-  }
-
-  private refused(problem: Problem): void {
-    this.newer.update((seen) => versionAfter(problem, seen));
-    this.problem.set(problem);
   }
 
   protected leave(id: string | undefined): void {

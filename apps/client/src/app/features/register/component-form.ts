@@ -4,10 +4,10 @@ import { Router } from '@angular/router';
 import { type ComponentBody, componentBody } from '@ligament/domain/contract/components';
 import { forkJoin, of, switchMap } from 'rxjs';
 import { loadable, LOADING } from '../../core/http/loadable';
-import { type Problem, problemOf, versionAfter } from '../../core/http/problem';
+import { type Problem, problemOf } from '../../core/http/problem';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { ProblemNotice } from '../../shared/problem/problem-notice';
-import { RecordForm } from '../../shared/record-form/record-form';
+import { RecordForm, type SavedRecord } from '../../shared/record-form/record-form';
 import type { RecordValue } from '../../shared/record-form/record-group';
 import { LoadingState } from '../../shared/states/loading-state';
 import { componentFields } from './component-fields';
@@ -57,8 +57,6 @@ export class ComponentForm {
   private readonly client = inject(RegisterClient);
   private readonly router = inject(Router);
   protected readonly problem = signal<Problem | null>(null);
-  /** Version shown by a refusal, newer than the one read. */
-  private readonly newer = signal<number | null>(null);
   protected readonly checks = componentBody.shape;
 
   protected readonly loaded = toSignal(
@@ -93,22 +91,17 @@ export class ComponentForm {
     this.id() ? `Change ${this.ready()?.component?.tag ?? 'component'}` : 'Add a component',
   );
 
-  protected save(value: RecordValue): void {
+  protected save({ value, version }: SavedRecord): void {
     // every field has passed the contract's check in the form
     const body = value as ComponentBody & { readonly reason: string };
     const component = this.ready()?.component;
     const saved = component
-      ? this.client.change(component.id, this.newer() ?? component.version, body)
+      ? this.client.change(component.id, version, body)
       : this.client.add(body);
     saved.subscribe({
       next: ({ id }) => this.leave(id),
-      error: (error: unknown) => this.refused(problemOf(error)),
+      error: (error: unknown) => this.problem.set(problemOf(error)),
     });
-  }
-
-  private refused(problem: Problem): void {
-    this.newer.update((seen) => versionAfter(problem, seen));
-    this.problem.set(problem);
   }
 
   protected leave(id: string | undefined): void {

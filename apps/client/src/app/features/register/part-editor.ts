@@ -10,8 +10,8 @@ import {
 import type { ComponentView } from '@ligament/domain/contract/components';
 import type { Observable } from 'rxjs';
 import { ApiClient } from '../../core/http/api-client';
-import { type Problem, problemOf, versionAfter } from '../../core/http/problem';
-import { RecordForm } from '../../shared/record-form/record-form';
+import { type Problem, problemOf } from '../../core/http/problem';
+import { RecordForm, type SavedRecord } from '../../shared/record-form/record-form';
 import type { RecordValue } from '../../shared/record-form/record-group';
 import { fillFromPressure } from './fill-from-pressure';
 import { type Part, PART_CHECKS, PART_ROUTES, partFields, type PartKind } from './part-kinds';
@@ -44,8 +44,6 @@ export class PartEditor {
   readonly cancelled = output();
   private readonly api = inject(ApiClient);
   protected readonly problem = signal<Problem | null>(null);
-  /** Version shown by a refusal, newer than the one read. */
-  private readonly newer = signal<number | null>(null);
   protected readonly fields = computed(() => partFields(this.kind(), this.component()));
   protected readonly checks = computed(() => PART_CHECKS[this.kind()]);
   protected readonly fill = computed(() =>
@@ -55,19 +53,14 @@ export class PartEditor {
     this.kind() === 'operating cycle' ? 'an operating cycle' : `a ${this.kind()}`,
   );
 
-  protected save(value: RecordValue): void {
-    this.send(value).subscribe({
+  protected save({ value, version }: SavedRecord): void {
+    this.send(value, version).subscribe({
       next: () => this.saved.emit(),
-      error: (error: unknown) => this.refused(problemOf(error)),
+      error: (error: unknown) => this.problem.set(problemOf(error)),
     });
   }
 
-  private refused(problem: Problem): void {
-    this.newer.update((seen) => versionAfter(problem, seen));
-    this.problem.set(problem);
-  }
-
-  private send(value: RecordValue): Observable<unknown> {
+  private send(value: RecordValue, version: number): Observable<unknown> {
     const part = this.part();
     // every field has passed the check of its own kind in the form, so the body is that kind's
     const body = value as never;
@@ -75,7 +68,7 @@ export class PartEditor {
     return part
       ? this.api.call(routes.change, {
           params: { id: part.id },
-          version: this.newer() ?? part.version,
+          version,
           body,
         })
       : this.api.call(routes.add, { params: { id: this.component().id }, body });

@@ -9,8 +9,7 @@ import { type Problem, problemOf } from '../../core/http/problem';
 import { Session } from '../../core/session/session';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { text } from '../../shared/record-form/record-field';
-import { RecordForm } from '../../shared/record-form/record-form';
-import type { RecordValue } from '../../shared/record-form/record-group';
+import { RecordForm, type SavedRecord } from '../../shared/record-form/record-form';
 import { FailedState } from '../../shared/states/failed-state';
 import { LoadingState } from '../../shared/states/loading-state';
 import { RegisterClient } from './register-client';
@@ -41,13 +40,11 @@ export class UnitList {
     this.open.set(unit);
   }
 
-  protected save(value: RecordValue): void {
+  protected save({ value, version }: SavedRecord): void {
     // every field has passed the contract's check in the form
     const body = value as { code: string; name: string; reason: string };
     const unit = this.open();
-    const saved = unit
-      ? this.client.changeUnit(unit.id, unit.version, body)
-      : this.client.addUnit(body);
+    const saved = unit ? this.client.changeUnit(unit.id, version, body) : this.client.addUnit(body);
     saved.subscribe({
       next: () => {
         this.edit(undefined);

@@ -2,7 +2,7 @@ import { type ComponentFixture, TestBed } from '@angular/core/testing';
 import { above0, line, optionalLine } from '@ligament/domain/contract/primitives';
 import * as z from 'zod';
 import { choice, choicesOf, date, given, text } from './record-field';
-import { RecordForm } from './record-form';
+import { RecordForm, type SavedRecord } from './record-form';
 import type { RecordValue } from './record-group';
 
 const FIELDS = [
@@ -23,14 +23,18 @@ describe('RecordForm', () => {
   let fixture: ComponentFixture<RecordForm>;
   let page: HTMLElement;
   let saved: RecordValue[];
+  let versions: SavedRecord['version'][];
 
   async function open(inputs: Readonly<Record<string, unknown>> = {}): Promise<void> {
     fixture = TestBed.createComponent(RecordForm);
     Object.entries({ fields: FIELDS, checks: CHECKS, ...inputs }).forEach(([name, value]) =>
       fixture.componentRef.setInput(name, value),
     );
-    saved = [];
-    fixture.componentInstance.saved.subscribe((value) => saved.push(value));
+    [saved, versions] = [[], []];
+    fixture.componentInstance.saved.subscribe(({ value, version }) => {
+      saved.push(value);
+      versions.push(version);
+    });
     page = fixture.nativeElement as HTMLElement;
     await fixture.whenStable();
   }
@@ -117,7 +121,13 @@ describe('RecordForm', () => {
   });
 
   it('takes over what somebody else changed, keeps what was typed, and tells both', async () => {
-    const start = { name: 'A516-70', kind: 'plate', yieldMpa: 285, since: '2012-10-01' };
+    const start = {
+      name: 'A516-70',
+      kind: 'plate',
+      yieldMpa: 285,
+      since: '2012-10-01',
+      version: 4,
+    };
     await open({ start, asksReason: true });
     type('Yield, MPa', '290');
     const current = { ...start, yieldMpa: 280, kind: 'pipe', version: 5 };
@@ -133,6 +143,7 @@ describe('RecordForm', () => {
     ]);
     type('Reason for the change', 'Second certificate');
     await send();
+    expect(versions).toEqual([5]);
     expect(saved[0]).toMatchObject({ name: 'A516-70', kind: 'pipe', yieldMpa: 290 });
   });
 

@@ -27,6 +27,14 @@ interface ShownProblem {
   readonly current?: unknown;
 }
 
+/** What is to be saved. */
+export interface SavedRecord {
+  /** The body for the contract; every field has passed its check. */
+  readonly value: RecordValue;
+  /** Version it is saved on: that of the record last shown, also by a refusal; 0 for a new record. */
+  readonly version: number;
+}
+
 /** Fills fields from what others hold, e.g. stresses from a pressure. */
 export interface RecordFill {
   readonly label: string;
@@ -66,8 +74,7 @@ export class RecordForm {
   readonly problem = input<ShownProblem | null>(null);
   /** Offered beside the fields where some follow from others. */
   readonly fill = input<RecordFill | null>(null);
-  /** The body for the contract; every field has passed its check. */
-  readonly saved = output<RecordValue>();
+  readonly saved = output<SavedRecord>();
   readonly cancelled = output();
 
   protected readonly prefix = `record-${++forms}-`;
@@ -76,8 +83,8 @@ export class RecordForm {
     recordGroup(this.fields(), this.checks(), this.start(), this.asksReason()),
   );
 
-  /** The form as last read from the record, to tell what changed meanwhile. */
-  private readonly base = linkedSignal(() => this.formOf(this.start()));
+  /** The record as last shown: as it was opened, or as somebody else left it meanwhile. */
+  private readonly seen = linkedSignal(() => this.start());
   protected readonly meanwhile = signal<readonly ChangedMeanwhile[]>([]);
   protected readonly filled = signal('');
 
@@ -91,9 +98,10 @@ export class RecordForm {
   private show(problem: ShownProblem): void {
     showProblemOnForm(this.group(), problem);
     if (problem.current === null || typeof problem.current !== 'object') return;
-    const theirs = this.formOf(problem.current as RecordValue);
-    this.meanwhile.set(mergeMeanwhile(this.fields(), this.group(), this.base(), theirs));
-    this.base.set(theirs);
+    const current = problem.current as RecordValue;
+    const [before, now] = [this.formOf(this.seen()), this.formOf(current)];
+    this.meanwhile.set(mergeMeanwhile(this.fields(), this.group(), before, now));
+    this.seen.set(current);
   }
 
   private formOf(record: RecordValue) {
@@ -117,6 +125,8 @@ export class RecordForm {
   protected save(): void {
     const group = this.group();
     group.markAllAsTouched();
-    if (group.valid) this.saved.emit(recordValue(this.fields(), group));
+    if (!group.valid) return;
+    const version = Number(this.seen()['version'] ?? 0);
+    this.saved.emit({ value: recordValue(this.fields(), group), version });
   }
 }
