@@ -10,6 +10,7 @@ export interface Wall {
   readonly thickness: Mm;
   readonly width: Mm;
   readonly insideRadius: Mm;
+  readonly holeRadius: Mm;
 }
 
 /** One assessment in plain numbers and one unit system, origins left behind. */
@@ -45,6 +46,7 @@ export function flawCase({ wall, flaw, stress, material }: AssessmentInput): Fla
       thickness: wall.thicknessMm.value as Mm,
       width: width as Mm,
       insideRadius: insideRadius as Mm,
+      holeRadius: 0 as Mm,
     },
     primaryMembrane: stress.primaryMembraneMPa.value,
     primaryBending: stress.primaryBendingMPa.value,
@@ -73,4 +75,5 @@ export const crackIn = ({ wall }: FlawCase, a: number, c: number, ligament: numb
   thickness: wall.thickness,
   width: wall.width,
   insideRadius: wall.insideRadius,
+  holeRadius: wall.holeRadius,
 });

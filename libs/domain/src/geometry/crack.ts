@@ -14,6 +14,8 @@ export interface Crack {
   readonly width: Mm;
   /** Ri: inside radius of a cylinder; Infinity for a plate [mm]. */
   readonly insideRadius: Mm;
+  /** r: radius of the hole the crack starts from; 0 without a hole [mm]. */
+  readonly holeRadius: Mm;
 }
 
 /** Distance from the centre of an embedded crack to the nearer face [mm]. */

@@ -11,6 +11,7 @@ export interface CrackSymbols {
   readonly p?: number;
   readonly W?: number;
   readonly Ri?: number;
+  readonly r?: number;
 }
 
 /** The crack of the given symbols [mm]. */
@@ -21,6 +22,7 @@ export const crackOf = ({
   p = 0,
   W = Infinity,
   Ri = Infinity,
+  r = 0,
 }: CrackSymbols): Crack => ({
   a: mm(a),
   c: mm(c),
@@ -28,6 +30,7 @@ export const crackOf = ({
   thickness: mm(t),
   width: mm(W),
   insideRadius: mm(Ri),
+  holeRadius: mm(r),
 });
 
 /** K per unit of stress of a solution at an angle [√mm]. */

@@ -18,7 +18,7 @@ const given = (value: number) => ({ value, provenance: 'assumed', note: '' }) as
 
 const plate = (toughness: number, residual: number): FlawCase => ({
   situation: { shape: 'plate', kind: 'surface', face: 'inside', orientation: 'axial' },
-  wall: { thickness: mm(25), width: mm(500), insideRadius: mm(Infinity) },
+  wall: { thickness: mm(25), width: mm(500), insideRadius: mm(Infinity), holeRadius: mm(0) },
   primaryMembrane: 200,
   primaryBending: 0,
   facePressure: 0,

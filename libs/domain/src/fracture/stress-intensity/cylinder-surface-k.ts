@@ -99,7 +99,9 @@ const cylinderSolution = (
     'K = plate value of G0 and G1, each times (1 + curvature share); σm G0 + σb (G0 − 2 (a/t) G1)',
   accuracy,
   limits: [...PLATE_SURFACE_LIMITS, WALL_LIMIT, bulgingLimit(table)],
+  front: 'ellipse',
   influence: (crack, angle, into) => cylinderSurfaceInfluence(crack, angle, into, table),
+  higher: null,
 });
 
 export const CYLINDER_AXIAL_INSIDE_K = cylinderSolution(

@@ -83,5 +83,7 @@ export const PLATE_EMBEDDED_K: StressIntensitySolution = {
   accuracy:
     'At mid-thickness within 2 % of finite elements to a/t = 0.4, 5 % at 0.8. Off the centre the symmetric form at the nearer face is an upper estimate.',
   limits: PLATE_EMBEDDED_LIMITS,
+  front: 'ellipse',
   influence: plateEmbeddedInfluence,
+  higher: null,
 };

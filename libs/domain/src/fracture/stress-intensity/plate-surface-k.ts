@@ -95,5 +95,7 @@ export const PLATE_SURFACE_K: StressIntensitySolution = {
   accuracy:
     'Published ±5 %. Against finite elements: deepest point in tension within 2 % to a/t = 0.4, 3 % at 0.6, 4 to 8 % high at 0.8.',
   limits: PLATE_SURFACE_LIMITS,
+  front: 'ellipse',
   influence: plateSurfaceInfluence,
+  higher: null,
 };
