@@ -31,6 +31,7 @@ export interface DemoComponent {
     readonly kind: LocationKind;
     readonly datum: string;
     readonly lengthMm?: number;
+    readonly holeRadiusMm?: number;
     readonly description?: string;
   };
   readonly moreLocations?: readonly DemoComponent['location'][];
@@ -636,7 +637,8 @@ export const COMPONENTS: readonly DemoComponent[] = [
       name: 'N1',
       kind: 'nozzle weld',
       datum: 'Punch mark on nozzle N1 at 12 o’clock looking in',
-      description: 'Inner corner of nozzle N1',
+      description: 'Inner corner of nozzle N1, bore 200 mm',
+      holeRadiusMm: 100,
     },
     moreLocations: [
       {
@@ -867,6 +869,7 @@ export const COMPONENTS: readonly DemoComponent[] = [
       kind: 'plain zone',
       datum: 'Punch mark on the cover rim at 12 o’clock',
       description: 'Edge of the 40 mm hole',
+      holeRadiusMm: 20,
     },
     stress: {
       hoopMembrane: 80,

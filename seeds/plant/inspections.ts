@@ -177,8 +177,9 @@ export const INSPECTIONS: readonly DemoInspection[] = [
       {
         flaw: 'F01',
         orientation: axial,
+        kind: 'corner',
         heightMm: 3.5,
-        lengthMm: 7,
+        lengthMm: 3.5,
         remarks: 'Nozzle N1 inner corner',
       },
     ],
@@ -413,8 +414,9 @@ export const INSPECTIONS: readonly DemoInspection[] = [
       {
         flaw: 'F01',
         orientation: axial,
+        kind: 'corner',
         heightMm: 4.3,
-        lengthMm: 8.6,
+        lengthMm: 4.3,
         remarks: 'Nozzle N1 inner corner',
       },
     ],
@@ -474,8 +476,9 @@ export const INSPECTIONS: readonly DemoInspection[] = [
       {
         flaw: 'F01',
         orientation: axial,
+        kind: 'corner',
         heightMm: 1.8,
-        lengthMm: 3.6,
+        lengthMm: 1.8,
         remarks: 'Corner of the 40 mm hole',
       },
     ],
@@ -598,8 +601,9 @@ export const INSPECTIONS: readonly DemoInspection[] = [
       {
         flaw: 'F01',
         orientation: axial,
+        kind: 'corner',
         heightMm: 5.2,
-        lengthMm: 10.4,
+        lengthMm: 5.2,
         remarks: 'Nozzle N1 inner corner',
       },
     ],

@@ -136,6 +136,7 @@ async function buildComponent(
       viewingDirection: 'looking with the flow, or down',
       circumferenceOn: 'outside',
       lengthMm: place.lengthMm ?? null,
+      holeRadiusMm: place.holeRadiusMm ?? null,
     });
     locationIds.set(place.name, added.id);
   }

@@ -22,10 +22,10 @@ const MAY: Readonly<Record<string, readonly string[]>> = {
     'domain/fracture',
     'domain/growth',
   ],
-  'domain/assessment-types': ['domain/units'],
+  'domain/assessment-types': ['domain/units', 'domain/geometry'],
   'domain/scheduling': ['domain/units', 'domain/assessment-types'],
   'domain/inspection': ['domain/units', 'domain/geometry', 'domain/contract'],
-  'domain/contract': ['domain/units', 'domain/assessment-types'],
+  'domain/contract': ['domain/units', 'domain/geometry', 'domain/assessment-types'],
   'domain/schema': ['domain/contract', 'domain/units', 'domain/assessment-types'],
 };
 

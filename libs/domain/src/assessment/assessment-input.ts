@@ -1,20 +1,45 @@
+import type { FlawKind } from '../geometry/flaw-kind';
 import type { Given } from '../units/provenance';
+import type { OptionsInput } from './assessment-input-options';
 
-/** The wall that holds the flaw. A plate of width `null` is taken as wide against the flaw. */
+/** The body that holds the flaw. A plate of width `null` is taken as wide against the flaw. */
 export type WallInput =
   | { readonly shape: 'plate'; readonly thicknessMm: Given; readonly widthMm: Given | null }
-  | { readonly shape: 'cylinder'; readonly thicknessMm: Given; readonly insideDiameterMm: Given };
+  | {
+      readonly shape: 'cylinder' | 'sphere';
+      readonly thicknessMm: Given;
+      readonly insideDiameterMm: Given;
+    }
+  | {
+      /** A plate with a round hole from whose edge the flaw starts, at one side of the hole or at both. */
+      readonly shape: 'hole edge';
+      readonly thicknessMm: Given;
+      readonly holeRadiusMm: Given;
+      readonly widthMm: Given | null;
+      readonly flawedSides: 'one' | 'both';
+    }
+  /** The inner corner where a nozzle meets the shell; the stress is that across the corner. */
+  | {
+      readonly shape: 'nozzle corner';
+      readonly thicknessMm: Given;
+      readonly holeRadiusMm: Given;
+    }
+  /** A round bar; its thickness is the diameter. */
+  | { readonly shape: 'round bar'; readonly thicknessMm: Given };
 
 /** The flaw as measured, before any sizing allowance. */
 export interface FlawInput {
-  readonly kind: 'surface' | 'embedded';
+  readonly kind: FlawKind;
   /** Face a surface flaw opens to; for an embedded flaw the face its ligament is measured to. */
   readonly face: 'inside' | 'outside';
   /** Plane of the flaw in a cylinder; in a plate it is normal to the membrane stress and this is ignored. */
   readonly orientation: 'axial' | 'circumferential';
-  /** Through-wall extent [mm]: depth a of a surface flaw, full height 2a of an embedded one. */
+  /**
+   * Through-wall extent [mm]: depth a of a surface or corner flaw, full height 2a of an embedded one. A flaw
+   * through the wall or the edge has the wall's thickness and this is ignored.
+   */
   readonly heightMm: Given;
-  /** Length along the wall, 2c [mm]. */
+  /** Length along the wall [mm]: 2c, or c measured from the edge for a corner or edge flaw and one at a hole. */
   readonly lengthMm: Given;
   /** Ligament p from an embedded flaw to `face` [mm]; null for a surface flaw. */
   readonly ligamentMm: Given | null;
@@ -34,6 +59,10 @@ export type ResidualStressInput =
   | { readonly state: 'entered'; readonly membraneMPa: Given; readonly bendingMPa: Given }
   /** Yield magnitude, relaxed by the primary load: min(yield, (1.4 − σref/σflow) yield). */
   | { readonly state: 'as-welded' }
+  /** Yield magnitude, relaxed once by a proof test: the stress of that test normal to the flaw. */
+  | { readonly state: 'proof-tested'; readonly membraneMPa: Given; readonly bendingMPa: Given }
+  /** A polynomial through the wall, Σ sₙ (x/t)ⁿ, x from the flawed face [MPa]. */
+  | { readonly state: 'profile'; readonly profileMPa: Given<readonly number[]> }
   /** 20 % of yield for a flaw parallel to the weld, 30 % for one transverse to it. */
   | { readonly state: 'heat-treated'; readonly flawToWeld: 'parallel' | 'transverse' };
 
@@ -44,6 +73,15 @@ export interface StressInput {
   readonly residual: ResidualStressInput;
   /** Pressure acting on the faces of a crack open to the bore [MPa]; 0 or null when it does not reach them. */
   readonly crackFacePressureMPa: Given | null;
+  /**
+   * Primary stress as a polynomial through the wall, Σ sₙ (x/t)ⁿ to the fourth degree, x from the flawed face
+   * [MPa]. Where it is given, membrane and bending are its linear part and the two inputs above are ignored.
+   */
+  readonly primaryProfileMPa?: Given<readonly number[]> | null;
+  /** Weld whose toe the flaw starts from: length of the attachment along the stress [mm]. */
+  readonly weldToe?: { readonly attachmentLengthMm: Given } | null;
+  /** Offset of the two walls at a butt weld; it adds bending to the primary membrane stress [mm]. */
+  readonly offsetMm?: Given | null;
 }
 
 /** Material at the governing temperature. */
@@ -56,6 +94,14 @@ export interface MaterialInput {
   readonly toughnessMPaSqrtM: Given;
   /** Whether the stress–strain curve has a yield plateau (no diagram beyond Lr = 1 is then claimed). */
   readonly yieldPlateau: boolean;
+  /** Stress–strain curve, engineering values: the diagram is then Option 2. */
+  readonly stressStrainCurve?: Given<readonly StressStrainPoint[]> | null;
+}
+
+/** One point of an engineering stress–strain curve. */
+export interface StressStrainPoint {
+  readonly strain: number;
+  readonly stressMPa: number;
 }
 
 /** One straight piece of a two-stage Paris law, N and mm: da/dN [mm/cycle] = coefficient · ΔK^exponent, ΔK in MPa·√mm. */
@@ -97,7 +143,7 @@ export interface GrowthInput {
 }
 
 /** Everything one assessment needs, in N and mm but for the fields that name another unit. */
-export interface AssessmentInput {
+export interface AssessmentInput extends OptionsInput {
   readonly wall: WallInput;
   readonly flaw: FlawInput;
   readonly sizing: SizingInput;

@@ -1,3 +1,5 @@
+import type { FlawKind } from '../geometry/flaw-kind';
+
 /** Why no verdict is given: which input breaks which limit, and what can be done instead. */
 export interface Refusal {
   /** Path of the input at fault, e.g. `flaw.heightMm`. */
@@ -49,7 +51,7 @@ export interface FrontPoint {
 export interface GrowthState {
   readonly years: number;
   readonly cycles: number;
-  readonly kind: 'surface' | 'embedded' | 'through-wall';
+  readonly kind: FlawKind;
   readonly heightMm: number;
   readonly lengthMm: number;
   /** Ligament of an embedded flaw to the nearer face; otherwise the wall left ahead of the flaw [mm]. */
@@ -75,6 +77,7 @@ export interface GrowthEvent {
   readonly to: 'surface' | 'through-wall';
   readonly heightBeforeMm: number;
   readonly heightAfterMm: number;
+  readonly lengthAfterMm?: number;
   readonly rule: string;
 }
 
@@ -128,6 +131,8 @@ export interface AssessedFlaw {
   readonly reserveOnToughness: number | null;
   /** Limiting through-wall extent at the present length [mm]; null when none inside validity. */
   readonly limitingHeightMm: number | null;
+  /** Limiting length of a flaw through the wall or the edge [mm]; null for a flaw with a height of its own. */
+  readonly limitingLengthMm?: number | null;
   readonly limitingBecause: string;
   readonly path: readonly GrowthState[];
   readonly events: readonly GrowthEvent[];

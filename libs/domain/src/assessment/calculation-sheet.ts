@@ -1,7 +1,7 @@
 import type { CalculationStep, RemainingLife } from './assessment-outcome';
 import type { AssessmentInput } from './assessment-input';
 import type { CharacterisedFlaw } from './characterise';
-import type { LimitingHeight } from './limiting-height';
+import type { LimitingSize } from './limiting-size';
 import type { Section } from './section';
 import { diagramSteps } from './sheet/diagram-steps';
 import { lifeSteps } from './sheet/life-steps';
@@ -15,7 +15,7 @@ export interface SheetSubject {
   readonly flaw: CharacterisedFlaw;
   readonly section: Section;
   readonly point: Standing;
-  readonly limiting: LimitingHeight;
+  readonly limiting: LimitingSize;
   readonly life: RemainingLife;
 }
 

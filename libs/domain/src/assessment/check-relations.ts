@@ -1,5 +1,9 @@
 import type { AssessmentInput } from './assessment-input';
 import type { Refusal } from './assessment-outcome';
+import { isCovered } from '../fracture/select-solutions';
+import { linearised } from '../fracture/stress-intensity/stress-terms';
+import { hasHeight, hasLength, KINDS_OF_WALL } from '../geometry/flaw-kind';
+import { flawCase, primaryTerms } from './flaw-case';
 import { number } from './number-text';
 
 type Rule = (input: AssessmentInput) => Refusal | null;
@@ -8,7 +12,21 @@ type Rule = (input: AssessmentInput) => Refusal | null;
 export const checkRelations = (input: AssessmentInput): readonly Refusal[] =>
   RULES.map((rule) => rule(input)).filter((refusal) => refusal !== null);
 
+const kindFitsWall: Rule = (input) => {
+  const { wall, flaw } = input;
+  const kinds = KINDS_OF_WALL[wall.shape];
+  if (kinds.includes(flaw.kind) && isCovered(flawCase(input).situation)) return null;
+  return {
+    input: 'flaw.kind',
+    limit: `${wall.shape}: ${kinds.join(', ')}`,
+    value: flaw.kind,
+    message: `No solution here covers a flaw of kind ${flaw.kind} in a ${wall.shape}.`,
+    instead: 'Choose the idealised shape that encloses the flaw, or ask a specialist.',
+  };
+};
+
 const heightLeavesWall: Rule = ({ wall, flaw, sizing }) => {
+  if (!hasHeight(flaw.kind)) return null;
   const t = wall.thicknessMm.value;
   const value = flaw.heightMm.value + sizing.heightAllowanceMm.value;
   if (value < t) return null;
@@ -36,9 +54,10 @@ const ligamentFits: Rule = ({ wall, flaw }) => {
 };
 
 const lengthNotBelowHeight: Rule = ({ flaw }) => {
+  if (!hasHeight(flaw.kind) || !hasLength(flaw.kind)) return null;
   const [height, value] = [flaw.heightMm.value, flaw.lengthMm.value];
   // both mean a/c ≤ 2: a surface flaw's height is a, an embedded one's is 2a
-  const least = flaw.kind === 'surface' ? height : height / 2;
+  const least = flaw.kind === 'surface' ? height : height / 2; // a corner flaw's length is c
   if (value >= least) return null;
   return {
     input: 'flaw.lengthMm',
@@ -50,7 +69,8 @@ const lengthNotBelowHeight: Rule = ({ flaw }) => {
 };
 
 const lengthInsideWidth: Rule = ({ wall, flaw }) => {
-  const width = wall.shape === 'plate' ? (wall.widthMm?.value ?? Infinity) : Infinity;
+  const flat = wall.shape === 'plate' || wall.shape === 'hole edge';
+  const width = flat ? (wall.widthMm?.value ?? Infinity) : Infinity;
   const value = flaw.lengthMm.value;
   if (value < width) return null;
   return {
@@ -74,9 +94,10 @@ const tensileAboveYield: Rule = ({ material }) => {
   };
 };
 
-const somePrimaryStress: Rule = ({ stress }) => {
-  const value = stress.primaryMembraneMPa.value + Math.abs(stress.primaryBendingMPa.value);
-  if (value > 0) return null;
+const somePrimaryStress: Rule = ({ stress, wall }) => {
+  const { membrane, bending } = linearised(primaryTerms(stress, wall.thicknessMm.value));
+  const value = membrane + Math.abs(bending);
+  if (value > 0 && membrane >= 0) return null;
   return {
     input: 'stress.primaryMembraneMPa',
     limit: 'some primary stress above 0 MPa',
@@ -112,6 +133,7 @@ const stagesMeet: Rule = ({ growth }) => {
 };
 
 const RULES: readonly Rule[] = [
+  kindFitsWall,
   heightLeavesWall,
   ligamentFits,
   lengthNotBelowHeight,

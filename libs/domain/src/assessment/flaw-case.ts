@@ -1,11 +1,24 @@
-import type { FlawSituation } from '../fracture/select-solutions';
 import type { DiagramMaterial } from '../fracture/fad/option-one';
+import type { FlawSituation } from '../fracture/select-solutions';
+import {
+  linearised,
+  linearTerms,
+  scaled,
+  termsOf,
+} from '../fracture/stress-intensity/stress-terms';
+import type { StressTerms } from '../fracture/stress-intensity/stress-terms';
 import type { Crack } from '../geometry/crack';
 import { MPA_SQRT_MM_PER } from '../units/exact-factors';
 import type { Mm } from '../units/quantity';
-import type { AssessmentInput, ResidualStressInput } from './assessment-input';
+import type {
+  AssessmentInput,
+  ResidualStressInput,
+  StressInput,
+  WallInput,
+} from './assessment-input';
+import { factorsOf } from './partial-factors';
 
-/** The wall in plain numbers [mm]; what a plate lacks is infinite. */
+/** The wall in plain numbers [mm]; what a body lacks is infinite, and the hole then has no radius. */
 export interface Wall {
   readonly thickness: Mm;
   readonly width: Mm;
@@ -17,55 +30,75 @@ export interface Wall {
 export interface FlawCase {
   readonly situation: FlawSituation;
   readonly wall: Wall;
-  readonly primaryMembrane: number;
-  /** Positive when the face the flaw is measured from is in tension [MPa]. */
-  readonly primaryBending: number;
+  /** Primary stress at service load, from the face the flaw is measured from [MPa]. */
+  readonly primary: StressTerms;
   readonly facePressure: number;
   readonly residual: ResidualStressInput;
   readonly material: DiagramMaterial;
   readonly poissonsRatio: number;
   /** Kmat [MPa·√mm]. */
   readonly toughness: number;
+  /** Length of the attachment whose toe the flaw starts from; null without one [mm]. */
+  readonly attachmentLength: number | null;
 }
 
-/** Strips origins and converts units; the input has passed its checks. */
-export function flawCase({ wall, flaw, stress, material }: AssessmentInput): FlawCase {
-  const cylinder = wall.shape === 'cylinder';
-  const insideRadius = cylinder ? wall.insideDiameterMm.value / 2 : Infinity;
-  const width = cylinder
-    ? cylinderWidth(flaw.orientation, insideRadius)
-    : (wall.widthMm?.value ?? Infinity);
+/** Strips origins, converts units and applies partial factors; the input has passed its checks. */
+export function flawCase(input: AssessmentInput): FlawCase {
+  const { wall, flaw, stress, material } = input;
+  const factors = factorsOf(input);
   return {
     situation: {
       shape: wall.shape,
       kind: flaw.kind,
       face: flaw.face,
       orientation: flaw.orientation,
+      flawedSides: wall.shape === 'hole edge' ? wall.flawedSides : 'one',
     },
-    wall: {
-      thickness: wall.thicknessMm.value as Mm,
-      width: width as Mm,
-      insideRadius: insideRadius as Mm,
-      holeRadius: 0 as Mm,
-    },
-    primaryMembrane: stress.primaryMembraneMPa.value,
-    primaryBending: stress.primaryBendingMPa.value,
-    facePressure: stress.crackFacePressureMPa?.value ?? 0,
+    wall: wallOf(wall, flaw.orientation),
+    primary: scaled(primaryTerms(stress, wall.thicknessMm.value), factors.stress),
+    facePressure: factors.stress * (stress.crackFacePressureMPa?.value ?? 0),
     residual: stress.residual,
     material: {
-      yieldMPa: material.yieldMPa.value,
-      tensileMPa: material.tensileMPa.value,
+      yieldMPa: material.yieldMPa.value / factors.strength,
+      tensileMPa: material.tensileMPa.value / factors.strength,
       youngsModulusMPa: material.youngsModulusMPa.value,
       yieldPlateau: material.yieldPlateau,
     },
     poissonsRatio: material.poissonsRatio.value,
-    toughness: material.toughnessMPaSqrtM.value * MPA_SQRT_MM_PER['MPa·√m'],
+    toughness: (material.toughnessMPaSqrtM.value * MPA_SQRT_MM_PER['MPa·√m']) / factors.toughness,
+    attachmentLength: stress.weldToe?.attachmentLengthMm.value ?? null,
   };
 }
 
-// a circumferential flaw can be no wider than the bore's circumference; an axial one has the shell's length
-const cylinderWidth = (orientation: FlawSituation['orientation'], insideRadius: number) =>
-  orientation === 'circumferential' ? 2 * Math.PI * insideRadius : Infinity;
+/** Primary stress as entered, with the bending an offset of the walls adds: 3e/t of the membrane part. */
+export function primaryTerms(stress: StressInput, thickness: number): StressTerms {
+  const profile = stress.primaryProfileMPa;
+  const entered = profile
+    ? termsOf(profile.value)
+    : linearTerms(stress.primaryMembraneMPa.value, stress.primaryBendingMPa.value);
+  const offset = stress.offsetMm?.value ?? 0;
+  if (offset === 0) return entered;
+  const added = (3 * offset * linearised(entered).membrane) / thickness;
+  return { ...entered, bending: entered.bending + added };
+}
+
+function wallOf(wall: WallInput, orientation: FlawSituation['orientation']): Wall {
+  const round = wall.shape === 'cylinder' || wall.shape === 'sphere';
+  const insideRadius = round ? wall.insideDiameterMm.value / 2 : Infinity;
+  const flat = wall.shape === 'plate' || wall.shape === 'hole edge';
+  const width = flat
+    ? (wall.widthMm?.value ?? Infinity)
+    : wall.shape === 'cylinder' && orientation === 'circumferential'
+      ? 2 * Math.PI * insideRadius
+      : Infinity;
+  const holed = wall.shape === 'hole edge' || wall.shape === 'nozzle corner';
+  return {
+    thickness: wall.thicknessMm.value as Mm,
+    width: width as Mm,
+    insideRadius: insideRadius as Mm,
+    holeRadius: (holed ? wall.holeRadiusMm.value : 0) as Mm,
+  };
+}
 
 /** The crack of a given size in the wall of the case. */
 export const crackIn = ({ wall }: FlawCase, a: number, c: number, ligament: number): Crack => ({

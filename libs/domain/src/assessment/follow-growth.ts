@@ -1,5 +1,13 @@
 import { integrateGrowth, type GrowthLimit, type GrowthRun } from '../growth/integrate-growth';
-import { PROXIMITY_RULE, proximityMargin, surfaceDepth } from '../growth/recategorise';
+import {
+  PROXIMITY_RULE,
+  proximityMargin,
+  surfaceDepth,
+  THROUGH_WALL_RULE,
+  throughWallHalfLength,
+} from '../growth/recategorise';
+import { DEPTH_RATIO } from '../geometry/limit';
+import type { FlawKind } from '../geometry/flaw-kind';
 import { ratesPerYear, type Drivers, type Rates } from '../growth/growth-rates';
 import type { GrowthEnd, GrowthEvent, GrowthState } from './assessment-outcome';
 import type { CharacterisedFlaw } from './characterise';
@@ -38,12 +46,9 @@ export function followGrowth(
     const last = run.states[run.states.length - 1] ?? { years: 0, a: current.a, c: current.c };
     elapsed += last.years;
     if (run.limit !== 'proximity') {
-      return {
-        path: growthStates(stretches, drivers),
-        events,
-        years: elapsed,
-        ...endOf(run, section, last),
-      };
+      const end = endOf(run, section, last);
+      if (end.end === 'through-wall') events.push(breakthrough(section, last, elapsed));
+      return { path: growthStates(stretches, drivers), events, years: elapsed, ...end };
     }
     const nearest = section.ligament(last.a);
     const depth = surfaceDepth(last.a, nearest);
@@ -56,6 +61,7 @@ export function followGrowth(
       rule: PROXIMITY_RULE,
     });
     current = {
+      ...current,
       kind: 'surface',
       face: section.nearestFace(last.a),
       a: depth,
@@ -111,11 +117,36 @@ function rateFunction(section: Section, drivers: Drivers) {
     deepest: (membrane, bending) => evaluator.deepest(membrane, bending),
     end: (membrane, bending) => evaluator.end(membrane, bending),
   });
+  const { front } = evaluator.solutions.stressIntensity;
   return (a: number, c: number, into: Rates) => {
     evaluator.takeEnds(crackAt(a, c));
     perYear(into);
+    // a straight front has no ends of its own, a through-wall crack no deepest point
+    if (front === 'straight') into.c = 0;
+    if (front === 'through') into.a = 0;
   };
 }
+
+/** The flaw that reaches the far face: from there on it is a leak. */
+function breakthrough(
+  section: Section,
+  { a, c }: { readonly a: number; readonly c: number },
+  years: number,
+): GrowthEvent {
+  const { thickness } = section.flaw.wall;
+  return {
+    years,
+    from: 'surface',
+    to: 'through-wall',
+    heightBeforeMm: a,
+    heightAfterMm: thickness,
+    lengthAfterMm: 2 * throughWallHalfLength(a, c, thickness),
+    rule: THROUGH_WALL_RULE,
+  };
+}
+
+/** Kinds that become through-wall when the solution ends at their depth. */
+const BREAKS_THROUGH = new Set<FlawKind>(['surface', 'extended surface', 'corner']);
 
 function endOf(
   run: GrowthRun,
@@ -129,12 +160,14 @@ function endOf(
       return { end: 'no growth', validityLimit: null };
     case 'step limit':
       return { end: 'outside validity', validityLimit: 'steps of the integration' };
-    case 'limit':
-      return run.limit === 'diagram'
-        ? { end: 'limit reached', validityLimit: null }
-        : {
-            end: 'outside validity',
-            validityLimit: section.validity(last.a, last.c).limit?.text ?? null,
-          };
+    case 'limit': {
+      if (run.limit === 'diagram') return { end: 'limit reached', validityLimit: null };
+      const { limit } = section.validity(last.a, last.c);
+      const through = limit?.name === DEPTH_RATIO && BREAKS_THROUGH.has(section.kind);
+      return {
+        end: through ? 'through-wall' : 'outside validity',
+        validityLimit: limit?.text ?? null,
+      };
+    }
   }
 }

@@ -1,5 +1,6 @@
 import type { AssessmentInput } from './assessment-input';
-import { readNumbers } from './read-numbers';
+import type { WallShape } from '../geometry/flaw-kind';
+import { readGivenNumbers, readNumbers } from './read-numbers';
 
 /** What one number of the input may be, and what a value far outside usually means. */
 export interface Bound {
@@ -27,6 +28,7 @@ const RANGE = 'Give the range from least to greatest stress in MPa, not the ampl
 const LAW = 'Give the law for mm/cycle and MPa·√mm.';
 const RATE = 'Give it in mm/year.';
 const LIGAMENT = 'An embedded flaw needs the ligament to the face, in millimetres.';
+const FACTOR = 'A partial factor is at least 1; 1 changes nothing.';
 const TENSION = `Membrane compression is not a case for this method. ${STRESS}`;
 
 type Row = readonly [
@@ -65,28 +67,67 @@ const ALWAYS: readonly Row[] = [
   ['horizonYears', 'Horizon', 'years', 0, 100, 'Give it in years, at most 100.', 'above'],
 ];
 
-const PLATE: Row = ['wall.widthMm', 'Plate width', 'mm', 1, 1e6, LENGTH];
-const CYLINDER: Row = ['wall.insideDiameterMm', 'Inside diameter', 'mm', 10, 1e5, LENGTH];
+const WIDTH: Row = ['wall.widthMm', 'Plate width', 'mm', 1, 1e6, LENGTH];
+const BORE: Row = ['wall.insideDiameterMm', 'Inside diameter', 'mm', 10, 1e5, LENGTH];
+const HOLE: Row = ['wall.holeRadiusMm', 'Hole radius', 'mm', 1, 1e4, LENGTH];
 const EMBEDDED: Row = ['flaw.ligamentMm', 'Ligament', 'mm', 0, 1000, LIGAMENT];
 const ENTERED: readonly Row[] = [
   ['stress.residual.membraneMPa', 'Residual membrane stress', 'MPa', -2000, 2000, STRESS],
   ['stress.residual.bendingMPa', 'Residual bending stress', 'MPa', -2000, 2000, STRESS],
 ];
+const PROOF: readonly Row[] = [
+  ['stress.residual.membraneMPa', 'Membrane stress of the proof test', 'MPa', 0, 2000, STRESS],
+  ['stress.residual.bendingMPa', 'Bending stress of the proof test', 'MPa', -2000, 2000, STRESS],
+];
+
+const OF_SHAPE: Readonly<Record<WallShape, readonly Row[]>> = {
+  plate: [WIDTH],
+  cylinder: [BORE],
+  sphere: [BORE],
+  'hole edge': [HOLE, WIDTH],
+  'nozzle corner': [HOLE],
+  'round bar': [],
+};
+
+/** Inputs that may be left out altogether. */
+const OPTIONAL: readonly Row[] = [
+  ['stress.primaryProfileMPa.value.*', 'Primary stress polynomial', 'MPa', -5000, 5000, STRESS],
+  ['stress.residual.profileMPa.value.*', 'Residual stress polynomial', 'MPa', -5000, 5000, STRESS],
+  ['stress.weldToe.attachmentLengthMm', 'Length of the attachment', 'mm', 1, 1000, LENGTH],
+  ['stress.offsetMm', 'Offset of the walls', 'mm', -100, 100, LENGTH],
+  ['material.stressStrainCurve.value.*.strain', 'Strain', '', 0, 1, 'Give it as mm/mm, not in %.'],
+  ['material.stressStrainCurve.value.*.stressMPa', 'Stress of the curve', 'MPa', 0, 5000, STRESS],
+  ['growth.fatigue.blocks.*.stressRatio', 'Stress ratio', '', -20, 0.99, 'Least over greatest.'],
+  ['neighbours.*.heightMm', 'Height of the neighbour', 'mm', 0, 1000, LENGTH, 'above'],
+  ['neighbours.*.lengthMm', 'Length of the neighbour', 'mm', 0, 1e5, LENGTH, 'above'],
+  ['neighbours.*.ligamentMm', 'Ligament of the neighbour', 'mm', 0, 1000, LENGTH],
+  ['neighbours.*.distanceMm', 'Distance of the neighbour', 'mm', 0, 1e5, LENGTH],
+  ['neighbours.*.planeOffsetMm', 'Distance of the planes', 'mm', 0, 1e5, LENGTH],
+  ['partialFactors.stress', 'Factor on stress', '', 1, 5, FACTOR],
+  ['partialFactors.size', 'Factor on size', '', 1, 5, FACTOR],
+  ['partialFactors.toughness', 'Factor on toughness', '', 1, 5, FACTOR],
+  ['partialFactors.strength', 'Factor on strength', '', 1, 5, FACTOR],
+];
 
 /** Every number the input holds, or should hold, with its bounds. */
 export function inputBounds(input: AssessmentInput): readonly BoundedValue[] {
-  const embedded = input.flaw.kind === 'embedded';
-  const missing = embedded && input.flaw.ligamentMm === null;
+  const { kind, ligamentMm } = input.flaw;
+  const missing = kind === 'embedded' && ligamentMm === null;
   const rows = [
     ...ALWAYS,
-    input.wall.shape === 'plate' ? PLATE : CYLINDER,
+    ...OF_SHAPE[input.wall.shape],
     ...(input.stress.residual.state === 'entered' ? ENTERED : []),
-    ...(embedded && !missing ? [EMBEDDED] : []),
+    ...(input.stress.residual.state === 'proof-tested' ? PROOF : []),
+    ...(kind === 'embedded' && !missing ? [EMBEDDED] : []),
   ];
   const found = rows.flatMap((row) =>
     readNumbers(input, row[0]).map(({ path, value }) => ({ ...boundOf(row), path, value })),
   );
-  return missing ? [...found, { ...boundOf(EMBEDDED), value: Number.NaN }] : found;
+  const optional = OPTIONAL.flatMap((row) =>
+    readGivenNumbers(input, row[0]).map(({ path, value }) => ({ ...boundOf(row), path, value })),
+  );
+  const ligament = missing ? [{ ...boundOf(EMBEDDED), value: Number.NaN }] : [];
+  return [...found, ...optional, ...ligament];
 }
 
 const boundOf = ([path, name, unit, min, max, hint, above]: Row): Bound => ({

@@ -1,9 +1,9 @@
 import { characterise } from './characterise';
-import { limitingHeight } from './limiting-height';
+import { limitingExtent } from './limiting-extent';
 import { listAssumed } from './list-assumed';
 import { number } from './number-text';
 import { readNumbers } from './read-numbers';
-import { residualMembraneAt } from './residual-at';
+import { relaxedResidualAt } from './residual-at';
 import { flawCase } from './flaw-case';
 import { judge, type VerdictSubject } from './verdict';
 import { given, sampleInput } from './testing/sample-input';
@@ -19,6 +19,8 @@ describe('characterise', () => {
       c: 13,
       ligament: 0,
       height: 5,
+      sizedHeight: 5,
+      sizedLength: 26,
       recategorised: false,
     });
   });
@@ -130,23 +132,23 @@ describe('judge', () => {
   });
 });
 
-describe('limitingHeight', () => {
+describe('limitingExtent', () => {
   const search = { largest: 20, largestBecause: 'The solution ends.' };
 
   it('finds the first height on the line', () => {
-    expect(limitingHeight({ ...search, margin: (h) => 7 - h }).heightMm).toBeCloseTo(7, 7);
+    expect(limitingExtent({ ...search, margin: (h) => 7 - h }).extent).toBeCloseTo(7, 7);
   });
 
   it('gives the end of the solution with its reason when the line is not reached', () => {
-    expect(limitingHeight({ ...search, margin: () => 1 })).toEqual({
-      heightMm: 20,
+    expect(limitingExtent({ ...search, margin: () => 1 })).toEqual({
+      extent: 20,
       because: 'The solution ends.',
     });
   });
 
   it('gives none when even a very small flaw is outside', () => {
-    expect(limitingHeight({ ...search, margin: () => -1 }).heightMm).toBeNull();
-    expect(limitingHeight({ ...search, margin: () => Number.NaN }).heightMm).toBeNull();
+    expect(limitingExtent({ ...search, margin: () => -1 }).extent).toBeNull();
+    expect(limitingExtent({ ...search, margin: () => Number.NaN }).extent).toBeNull();
   });
 });
 
@@ -154,11 +156,11 @@ describe('the residual stress at a factor on the load', () => {
   const flaw = flawCase(sampleInput({ residual: { state: 'as-welded' } }));
 
   it('is not relaxed by a load that never came', () => {
-    expect(residualMembraneAt(flaw, 300, 2)).toBe(residualMembraneAt(flaw, 300, 1));
+    expect(relaxedResidualAt(flaw, 300, 2)).toBe(relaxedResidualAt(flaw, 300, 1));
   });
 
   it('is higher at a lower load', () => {
-    expect(residualMembraneAt(flaw, 300, 0.5)).toBeGreaterThan(residualMembraneAt(flaw, 300, 1));
-    expect(residualMembraneAt(flaw, 300, 0)).toBe(350);
+    expect(relaxedResidualAt(flaw, 300, 0.5)).toBeGreaterThan(relaxedResidualAt(flaw, 300, 1));
+    expect(relaxedResidualAt(flaw, 300, 0)).toBe(350);
   });
 });

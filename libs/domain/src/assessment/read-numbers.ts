@@ -12,6 +12,20 @@ export function readNumbers(data: unknown, path: string): readonly FoundNumber[]
   return walk(data, path.split('.'), []);
 }
 
+/** As `readNumbers`, for what may be left out: a member that is not there finds nothing. */
+export const readGivenNumbers = (data: unknown, path: string): readonly FoundNumber[] =>
+  readNumbers(data, path).filter(
+    ({ path: at, value }) => !Number.isNaN(value) || isThere(data, at),
+  );
+
+function isThere(data: unknown, path: string): boolean {
+  const inner = path.split('.').reduce<unknown>((each, name) => {
+    if (Array.isArray(each)) return each[Number(name)] as unknown;
+    return isRecord(each) ? each[name] : undefined;
+  }, data);
+  return inner !== undefined;
+}
+
 function walk(data: unknown, rest: readonly string[], gone: readonly string[]): FoundNumber[] {
   if (data === null) return [];
   const [next, ...after] = rest;

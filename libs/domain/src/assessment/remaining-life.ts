@@ -20,7 +20,7 @@ export const NO_LIFE: RemainingLife = {
 /** States the remaining life of an acceptable flaw, rounded down, with the reason it ends. */
 export function remainingLife(history: GrowthHistory, cyclesPerYear: number): RemainingLife {
   const years = down(history.years);
-  const event = history.events[0];
+  const event = history.events.find((each) => each.years < history.years);
   return {
     years,
     cycles: Math.floor(history.years * cyclesPerYear),
@@ -35,6 +35,8 @@ function because({ end, validityLimit }: GrowthHistory, years: number): string {
   switch (end) {
     case 'limit reached':
       return `The growing flaw reaches the line of the failure assessment diagram after ${after}.`;
+    case 'through-wall':
+      return `The growing flaw counts as through the wall after ${after} (${validityLimit ?? 'a/t'}): from then on it is a leak.`;
     case 'outside validity':
       return `After ${after} the growing flaw leaves the range of the solution (${validityLimit ?? 'limit not named'}); it is not followed further.`;
     case 'horizon':

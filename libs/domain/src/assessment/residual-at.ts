@@ -1,27 +1,42 @@
 import { heatTreatedResidual, relaxedResidual } from '../fracture/fad/residual-stress';
+import { linearTerms, termsOf, type StressTerms } from '../fracture/stress-intensity/stress-terms';
 import type { FlawCase } from './flaw-case';
 
 /** Residual stress that does not depend on the load [MPa]; zero where it does. */
-export function fixedResidual({ residual, material }: FlawCase): {
-  readonly membrane: number;
-  readonly bending: number;
-} {
+export function fixedResidual({ residual, material }: FlawCase): StressTerms {
   switch (residual.state) {
     case 'entered':
-      return { membrane: residual.membraneMPa.value, bending: residual.bendingMPa.value };
+      return linearTerms(residual.membraneMPa.value, residual.bendingMPa.value);
+    case 'profile':
+      return termsOf(residual.profileMPa.value);
     case 'heat-treated':
-      return { membrane: heatTreatedResidual(residual.flawToWeld, material.yieldMPa), bending: 0 };
+      return linearTerms(heatTreatedResidual(residual.flawToWeld, material.yieldMPa), 0);
+    case 'proof-tested':
+      return linearTerms(
+        relaxedResidual(
+          uncrackedReference(residual.membraneMPa.value, residual.bendingMPa.value),
+          material.yieldMPa,
+          material.tensileMPa,
+        ),
+        0,
+      );
     default:
-      return { membrane: 0, bending: 0 };
+      return linearTerms(0, 0);
   }
 }
 
 /**
- * Residual membrane stress at a factor on the primary load [MPa]. An as-welded one is relaxed by the load
- * the flaw sees in service: a larger load that never came relaxes nothing more, a smaller one leaves more.
+ * Reference stress of the proof test in the wall without a flaw: [Pb + √(Pb² + 9 Pm²)]/3. The flaw of that
+ * day is not known, and without it the relaxation is the least.
  */
-export function residualMembraneAt(flaw: FlawCase, reference: number, factor: number): number {
-  if (flaw.residual.state !== 'as-welded') return fixedResidual(flaw).membrane;
+const uncrackedReference = (membrane: number, bending: number): number =>
+  (Math.abs(bending) + Math.hypot(bending, 3 * membrane)) / 3;
+
+/**
+ * As-welded residual membrane stress at a factor on the primary load [MPa]. It is relaxed by the load the
+ * flaw sees in service: a larger load that never came relaxes nothing more, a smaller one leaves more.
+ */
+export function relaxedResidualAt(flaw: FlawCase, reference: number, factor: number): number {
   const { yieldMPa, tensileMPa } = flaw.material;
   return relaxedResidual(Math.min(factor, 1) * reference, yieldMPa, tensileMPa);
 }

@@ -1,5 +1,9 @@
+import { selectSolutions, type FlawSituation } from '../fracture/select-solutions';
+import { fromOtherFace, profileOf, termsOf } from '../fracture/stress-intensity/stress-terms';
 import type { Crack } from '../geometry/crack';
+import { lengthIsOneSided, type FlawKind } from '../geometry/flaw-kind';
 import { roomToUpperBounds, type Limit, type Room } from '../geometry/limit';
+import type { ResidualStressInput } from './assessment-input';
 import { OTHER_FACE, type CharacterisedFlaw } from './characterise';
 import { crackIn, type FlawCase } from './flaw-case';
 import { SectionEvaluator } from './section-evaluator';
@@ -7,7 +11,7 @@ import { SectionEvaluator } from './section-evaluator';
 /** A flaw in its category, ready to be evaluated at any size. */
 export interface Section {
   readonly flaw: FlawCase;
-  readonly kind: 'surface' | 'embedded';
+  readonly kind: FlawKind;
   readonly face: 'inside' | 'outside';
   readonly evaluator: SectionEvaluator;
   readonly limits: readonly Limit[];
@@ -20,6 +24,11 @@ export interface Section {
   readonly ligament: (a: number) => number;
   /** Face an embedded flaw of this half height is nearest to. */
   readonly nearestFace: (a: number) => 'inside' | 'outside';
+  /** Height and length of the flaw as they are measured [mm]. */
+  readonly shown: (
+    a: number,
+    c: number,
+  ) => { readonly heightMm: number; readonly lengthMm: number };
 }
 
 /** Sets a characterised flaw into its case: kind and face decide the solutions, the face the sign of bending. */
@@ -33,12 +42,12 @@ export function sectionOf(
     situation: { ...turned.situation, kind, face },
     facePressure: pressureOnFaces(flaw, kind, face),
   };
-  const evaluator = new SectionEvaluator(placed);
+  const evaluator = new SectionEvaluator(placed, selectSolutions(placed.situation));
   const { stressIntensity, referenceStress } = evaluator.solutions;
   const limits = [...stressIntensity.limits, ...referenceStress.limits];
   const { thickness } = placed.wall;
   const centre = startLigament + startA;
-  const toFace = (a: number) => (kind === 'surface' ? 0 : centre - a);
+  const toFace = (a: number) => (kind === 'embedded' ? centre - a : 0);
   const crackAt = (a: number, c: number) => crackIn(placed, a, c, Math.max(toFace(a), 0));
   return {
     flaw: placed,
@@ -52,10 +61,24 @@ export function sectionOf(
       return evaluator.margin(1);
     },
     validity: (a, c) => roomToUpperBounds(limits, crackAt(a, c)),
-    ligament: (a) =>
-      kind === 'surface' ? thickness - a : Math.min(toFace(a), thickness - a - centre),
+    ligament: (a) => ligamentAhead(kind, a, centre, thickness),
     nearestFace: (a) => (toFace(a) <= thickness - a - centre ? face : OTHER_FACE[face]),
+    shown: (a, c) => shownSize(placed.situation, a, c, thickness),
   };
+}
+
+/** Wall left ahead of the flaw: to the nearer face when it is embedded, none when it goes through. */
+function ligamentAhead(kind: FlawKind, a: number, centre: number, thickness: number): number {
+  if (kind === 'through-wall' || kind === 'edge') return 0;
+  return kind === 'embedded' ? Math.min(centre - a, thickness - a - centre) : thickness - a;
+}
+
+/** Height and length as they are measured, from the symbols of the solutions. */
+function shownSize({ kind, shape }: FlawSituation, a: number, c: number, thickness: number) {
+  if (kind === 'edge') return { heightMm: thickness, lengthMm: a };
+  const lengthMm = lengthIsOneSided(kind, shape) ? c : 2 * c;
+  if (kind === 'through-wall') return { heightMm: thickness, lengthMm };
+  return { heightMm: kind === 'embedded' ? 2 * a : a, lengthMm };
 }
 
 /** The medium reaches an embedded flaw once it breaks through to the bore, and not through the outside. */
@@ -66,14 +89,24 @@ function pressureOnFaces(flaw: FlawCase, kind: Section['kind'], face: Section['f
 }
 
 // seen from the other face, what was tension by bending is compression
-function turnedOver(flaw: FlawCase): FlawCase {
-  const { residual } = flaw;
-  return {
-    ...flaw,
-    primaryBending: -flaw.primaryBending,
-    residual:
-      residual.state === 'entered'
-        ? { ...residual, bendingMPa: { ...residual.bendingMPa, value: -residual.bendingMPa.value } }
-        : residual,
-  };
+const turnedOver = (flaw: FlawCase): FlawCase => ({
+  ...flaw,
+  primary: fromOtherFace(flaw.primary),
+  residual: turnedResidual(flaw.residual),
+});
+
+function turnedResidual(residual: ResidualStressInput): ResidualStressInput {
+  switch (residual.state) {
+    case 'entered':
+      return {
+        ...residual,
+        bendingMPa: { ...residual.bendingMPa, value: -residual.bendingMPa.value },
+      };
+    case 'profile': {
+      const value = profileOf(fromOtherFace(termsOf(residual.profileMPa.value)));
+      return { ...residual, profileMPa: { ...residual.profileMPa, value } };
+    }
+    default:
+      return residual;
+  }
 }

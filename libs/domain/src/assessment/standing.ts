@@ -5,7 +5,7 @@ import { toMPaSqrtM } from '../units/convert';
 import type { FrontPoint } from './assessment-outcome';
 import type { CharacterisedFlaw } from './characterise';
 import type { Section } from './section';
-import { FRONT_ANGLES, type DiagramPoint, type FrontState } from './section-evaluator';
+import type { DiagramPoint, FrontState } from './section-evaluator';
 
 /** Where the assessed flaw stands on the diagram today, with its reserves. */
 export interface Standing extends DiagramPoint {
@@ -23,15 +23,15 @@ export function standing(section: Section, { a, c }: CharacterisedFlaw): Standin
   const { evaluator, flaw } = section;
   evaluator.take(section.crackAt(a, c));
   const point = evaluator.point(1);
-  const states = FRONT_ANGLES.map((_, i) => evaluator.frontAt(i, 1));
+  const states = evaluator.angles.map((_, i) => evaluator.frontAt(i, 1));
   const line = optionOne(point.lr, flaw.material);
   const collapsed = point.lr >= evaluator.lrMax;
   return {
     ...point,
     reserveOnLoad: reserveOnLoad((factor) => evaluator.margin(factor), evaluator.lrMax / point.lr),
     reserveOnToughness: collapsed ? null : leastReserve(states, line, flaw.toughness),
-    front: states.map((state, i) => frontPoint(state, FRONT_ANGLES[i] ?? 0)),
-    angle: FRONT_ANGLES[point.governing] ?? 0,
+    front: states.map((state, i) => frontPoint(state, evaluator.angles[i] ?? 0)),
+    angle: evaluator.angles[point.governing] ?? 0,
     at: evaluator.frontAt(point.governing, 1),
     line,
   };

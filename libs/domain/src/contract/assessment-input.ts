@@ -7,18 +7,34 @@ import { FACES, FLAW_KINDS, ORIENTATIONS } from './vocabulary';
 const length = (high: number) => given(above0(high, 'mm'));
 const stress = given(between(-5000, 5000, 'MPa'));
 
+const thicknessMm = length(5000);
+const widthMm = length(1e6).nullable();
+
 const wall = z.discriminatedUnion('shape', [
+  z.strictObject({ shape: z.literal('plate'), thicknessMm, widthMm }),
   z.strictObject({
-    shape: z.literal('plate'),
-    thicknessMm: length(5000),
-    widthMm: length(1e6).nullable(),
-  }),
-  z.strictObject({
-    shape: z.literal('cylinder'),
-    thicknessMm: length(5000),
+    shape: z.enum(['cylinder', 'sphere']),
+    thicknessMm,
     insideDiameterMm: length(1e6),
   }),
+  z.strictObject({
+    shape: z.literal('hole edge'),
+    thicknessMm,
+    holeRadiusMm: length(1e5),
+    widthMm,
+    flawedSides: z.enum(['one', 'both']),
+  }),
+  z.strictObject({ shape: z.literal('nozzle corner'), thicknessMm, holeRadiusMm: length(1e5) }),
+  z.strictObject({ shape: z.literal('round bar'), thicknessMm }),
 ]);
+
+/** Coefficients of a polynomial through the wall, lowest degree first. */
+const profile = given(
+  z
+    .array(between(-1e5, 1e5, 'MPa'))
+    .min(1)
+    .max(5),
+);
 
 const flaw = z.strictObject({
   kind: z.enum(FLAW_KINDS),
@@ -33,6 +49,8 @@ const residual = z.discriminatedUnion('state', [
   z.strictObject({ state: z.literal('none') }),
   z.strictObject({ state: z.literal('entered'), membraneMPa: stress, bendingMPa: stress }),
   z.strictObject({ state: z.literal('as-welded') }),
+  z.strictObject({ state: z.literal('proof-tested'), membraneMPa: stress, bendingMPa: stress }),
+  z.strictObject({ state: z.literal('profile'), profileMPa: profile }),
   z.strictObject({
     state: z.literal('heat-treated'),
     flawToWeld: z.enum(['parallel', 'transverse']),
@@ -59,6 +77,36 @@ const block = z.strictObject({
 
 const rate = given(between(0, 1000, 'mm/year'));
 
+const neighbour = z.strictObject({
+  name: line(60),
+  kind: z.enum(['surface', 'embedded']),
+  heightMm: length(5000),
+  lengthMm: length(1e6),
+  ligamentMm: given(between(0, 5000, 'mm')).nullable(),
+  distanceMm: given(between(0, 1e6, 'mm')),
+  planeOffsetMm: given(between(0, 1e6, 'mm')),
+});
+
+const factor = between(1, 10, '');
+const choice = z.strictObject({ key: line(80), reason: prose(1000).min(3) });
+
+/** What may be left out. */
+const options = {
+  neighbours: z.array(neighbour).max(50).nullish(),
+  interactionRule: line(80).nullish(),
+  partialFactors: z
+    .strictObject({
+      stress: factor,
+      size: factor,
+      toughness: factor,
+      strength: factor,
+      note: prose(300),
+    })
+    .nullish(),
+  stressIntensityChoice: choice.nullish(),
+  referenceStressChoice: choice.nullish(),
+};
+
 /** Everything one assessment needs, as it travels and is kept; the same members as the engine's own type. */
 export const assessmentInput = z.strictObject({
   wall,
@@ -72,6 +120,9 @@ export const assessmentInput = z.strictObject({
     primaryBendingMPa: stress,
     residual,
     crackFacePressureMPa: given(between(0, 500, 'MPa')).nullable(),
+    primaryProfileMPa: profile.nullish(),
+    weldToe: z.strictObject({ attachmentLengthMm: length(5000) }).nullish(),
+    offsetMm: given(between(-1000, 1000, 'mm')).nullish(),
   }),
   material: z.strictObject({
     yieldMPa: given(above0(1e6, 'MPa')),
@@ -80,6 +131,11 @@ export const assessmentInput = z.strictObject({
     poissonsRatio: given(between(0, 0.5, '')),
     toughnessMPaSqrtM: given(above0(1e5, 'MPa√m')),
     yieldPlateau: z.boolean(),
+    stressStrainCurve: given(
+      z
+        .array(z.strictObject({ strain: between(0, 10, ''), stressMPa: between(0, 1e6, 'MPa') }))
+        .max(500),
+    ).nullish(),
   }),
   growth: z.strictObject({
     fatigue: z.strictObject({ law, blocks: z.array(block).max(200) }).nullable(),
@@ -88,4 +144,5 @@ export const assessmentInput = z.strictObject({
       .nullable(),
   }),
   horizonYears: between(1, 100, 'years'),
+  ...options,
 }) satisfies z.ZodType<AssessmentInput>;

@@ -83,6 +83,10 @@ export const locationBody = z.strictObject({
   viewingDirection: optionalLine(120),
   circumferenceOn: z.enum(FACES).describe('Face on which distances around are measured'),
   lengthMm: between(0, 1_000_000, 'mm').nullable().describe('Length of the weld [mm]'),
+  holeRadiusMm: between(1, 10_000, 'mm')
+    .nullable()
+    .default(null)
+    .describe('Radius of the hole or of the nozzle’s bore, at the edge of one [mm]'),
   heatTreatment: z.enum(HEAT_TREATMENTS).nullable().describe('Where it differs from the component'),
 });
 export type LocationBody = z.infer<typeof locationBody>;

@@ -72,8 +72,7 @@ export type Face = (typeof FACES)[number];
 export const ORIENTATIONS = ['axial', 'circumferential'] as const;
 export type Orientation = (typeof ORIENTATIONS)[number];
 
-export const FLAW_KINDS = ['surface', 'embedded'] as const;
-export type FlawKind = (typeof FLAW_KINDS)[number];
+export { FLAW_KINDS, type FlawKind } from '../geometry/flaw-kind';
 
 export const INDICATION_TYPES = [
   'crack',

@@ -8,6 +8,7 @@ import {
 } from './reference-stress/cylinder-axial-reference';
 import { PLATE_EMBEDDED_REFERENCE } from './reference-stress/plate-embedded-reference';
 import { PLATE_SURFACE_REFERENCE } from './reference-stress/plate-surface-reference';
+import type { FlawKind, WallShape } from '../geometry/flaw-kind';
 import type { ReferenceStressSolution } from './reference-stress/solution';
 import { CYLINDER_EMBEDDED_K } from './stress-intensity/cylinder-embedded-k';
 import {
@@ -22,10 +23,11 @@ import type { StressIntensitySolution } from './stress-intensity/solution';
 
 /** What the choice of a solution depends on. */
 export interface FlawSituation {
-  readonly shape: 'plate' | 'cylinder';
-  readonly kind: 'surface' | 'embedded';
+  readonly shape: WallShape;
+  readonly kind: FlawKind;
   readonly face: 'inside' | 'outside';
   readonly orientation: 'axial' | 'circumferential';
+  readonly flawedSides: 'one' | 'both';
 }
 
 /** The two solutions a flaw is assessed with. */
@@ -56,9 +58,17 @@ export const CATALOGUE = {
   ),
 } as const satisfies Readonly<Record<string, ChosenSolutions>>;
 
-/** Chooses the published solutions by geometry and flaw. */
+const placeOf = ({ shape, kind, face, orientation }: FlawSituation): string =>
+  shape === 'cylinder' && kind === 'surface' ? `${orientation} ${face}` : `${shape} ${kind}`;
+
+const BY_PLACE: Readonly<Record<string, ChosenSolutions>> = CATALOGUE;
+
+/** Whether published solutions cover the situation. */
+export const isCovered = (situation: FlawSituation): boolean => placeOf(situation) in BY_PLACE;
+
+/** The solutions that govern by default: chosen by the body, the flaw and where it opens. */
 export function selectSolutions(situation: FlawSituation): ChosenSolutions {
-  const { shape, kind, face, orientation } = situation;
-  if (kind === 'embedded') return CATALOGUE[`${shape} embedded`];
-  return shape === 'plate' ? CATALOGUE['plate surface'] : CATALOGUE[`${orientation} ${face}`];
+  const chosen = BY_PLACE[placeOf(situation)];
+  if (!chosen) throw new RangeError(`no solution for ${placeOf(situation)}`);
+  return chosen;
 }

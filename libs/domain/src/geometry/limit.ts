@@ -26,6 +26,9 @@ export interface LimitCheck {
   readonly source: string;
 }
 
+/** Name of every limit on depth against wall: a flaw at its end counts as through the wall. */
+export const DEPTH_RATIO = 'a/t';
+
 // a size that was driven to a bound by a root search may stand a rounding beyond it
 const ROUNDING = 1e-9;
 

@@ -14,3 +14,11 @@ export const becomesSurface = (a: number, nearerLigament: number): boolean =>
 
 /** Depth of the surface flaw it becomes: its height and the ligament together [mm]. */
 export const surfaceDepth = (a: number, nearerLigament: number): number => 2 * a + nearerLigament;
+
+/** The rule by which a surface flaw is taken as through the wall. */
+export const THROUGH_WALL_RULE =
+  'API 579-1 Part 9 form (from memory): a/t beyond the range of the solution, 0.8; half length c + (t − a)';
+
+/** Half length of the through-wall flaw that a deep surface flaw becomes [mm]. */
+export const throughWallHalfLength = (a: number, c: number, thickness: number): number =>
+  c + Math.max(thickness - a, 0);

@@ -6,7 +6,7 @@ import type { ProblemList } from './row-problem';
 import { depthTolerance, marginsOf } from './wall-margins';
 
 /**
- * Ligament of an embedded flaw to the nearer surface [mm], as stated or by the depths; null for a surface flaw.
+ * Ligament of an embedded flaw to the nearer surface [mm], as stated or by the depths; null for one that opens to a face.
  * Height and ligament must lie within the wall, and a stated ligament must agree with the depths.
  */
 export function readLigament(
@@ -23,7 +23,7 @@ export function readLigament(
     tell('stop', 'A ligament cannot be negative. Enter the metal between flaw and nearer surface.');
     return null;
   }
-  if (kind === 'surface') return null;
+  if (kind !== 'embedded') return null;
   const metal = marginsOf(context, size);
   const byDepths = metal && round(Math.max(0, Math.min(metal.above, metal.below)));
   const ligament = stated ?? byDepths ?? null;

@@ -32,7 +32,7 @@ export function readShape(
   const stated = read.length('ligament')?.mm ?? null;
   const kind = readPosition(read, answers, side, stated, problems);
   if (!kind || !orientation) return undefined;
-  const face = kind === 'surface' ? (side ?? answers.face) : nearerFace(context, size);
+  const face = kind === 'embedded' ? nearerFace(context, size) : (side ?? answers.face);
   if (!face) {
     problems.add(
       'stop',

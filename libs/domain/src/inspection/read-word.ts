@@ -14,6 +14,7 @@ export const readFace = reader<Face>([
 ]);
 
 export const readKind = reader<FlawKind>([
+  [/corner|\becke/i, 'corner'],
   [/embedded|internal|buried|subsurface|innenliegend/i, 'embedded'],
   [/surface|breaking|toe|root|oberfl/i, 'surface'],
 ]);

@@ -100,6 +100,8 @@ export const locations = pgTable(
     viewingDirection: text('viewing_direction').notNull().default(''),
     circumferenceOn: text('circumference_on').$type<Face>().notNull().default('outside'),
     lengthMm: doublePrecision('length_mm'),
+    /** Radius of the hole or of the nozzle's bore, where the place is the edge of one. */
+    holeRadiusMm: doublePrecision('hole_radius_mm'),
     heatTreatment: text('heat_treatment').$type<HeatTreatment>(),
     version: version(),
     createdAt: createdAt(),
@@ -110,6 +112,7 @@ export const locations = pgTable(
     oneOf('locations_kind', t.kind, LOCATION_KINDS),
     oneOf('locations_circumference_on', t.circumferenceOn, FACES),
     within('locations_length', t.lengthMm, 0, 1_000_000),
+    within('locations_hole_radius', t.holeRadiusMm, 1, 10_000),
   ],
 );
 

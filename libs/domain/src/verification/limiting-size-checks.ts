@@ -1,6 +1,7 @@
 import { limitingSize } from '../assessment/limiting-size';
 import { sectionOf } from '../assessment/section';
 import type { FlawCase } from '../assessment/flaw-case';
+import { linearTerms } from '../fracture/stress-intensity/stress-terms';
 import { mm } from '../units/quantity';
 import type { CheckRow } from './check-row';
 
@@ -17,15 +18,21 @@ const ROWS = [
 const given = (value: number) => ({ value, provenance: 'assumed', note: '' }) as const;
 
 const plate = (toughness: number, residual: number): FlawCase => ({
-  situation: { shape: 'plate', kind: 'surface', face: 'inside', orientation: 'axial' },
+  situation: {
+    shape: 'plate',
+    kind: 'surface',
+    face: 'inside',
+    orientation: 'axial',
+    flawedSides: 'one',
+  },
   wall: { thickness: mm(25), width: mm(500), insideRadius: mm(Infinity), holeRadius: mm(0) },
-  primaryMembrane: 200,
-  primaryBending: 0,
+  primary: linearTerms(200, 0),
   facePressure: 0,
   residual: { state: 'entered', membraneMPa: given(residual), bendingMPa: given(0) },
   material: { yieldMPa: 350, tensileMPa: 500, youngsModulusMPa: 207_000, yieldPlateau: false },
   poissonsRatio: 0.3,
   toughness: toughness * Math.sqrt(1000),
+  attachmentLength: null,
 });
 
 function limitingDepth(length: number, toughness: number, residual: number): number {
@@ -36,6 +43,8 @@ function limitingDepth(length: number, toughness: number, residual: number): num
     c: length / 2,
     ligament: 0,
     height: 5,
+    sizedHeight: 5,
+    sizedLength: length,
     recategorised: false,
   } as const;
   return limitingSize(sectionOf(plate(toughness, residual), flaw), flaw).heightMm ?? Number.NaN;

@@ -34,23 +34,39 @@ export function prefillInput(
   };
 }
 
-function wallOf({ component, finding }: AssessmentBasis): WallInput {
+function wallOf(basis: AssessmentBasis): WallInput {
+  const { component, finding } = basis;
   const nominal = `Nominal wall, drawing ${component.drawingNo || 'not named'}`;
   const thicknessMm: Given =
     finding.wallMm === null
       ? { value: component.wallMm, provenance: 'certificate', note: nominal }
       : { value: finding.wallMm, provenance: 'measured', note: 'Wall measured at the indication' };
-  if (component.kind === 'sphere' || component.kind === 'head')
-    return { shape: 'plate', thicknessMm, widthMm: null };
+  const drawing = `Drawing ${component.drawingNo || 'not named'}`;
+  if (finding.kind === 'corner') return cornerWall(basis, thicknessMm, drawing);
+  // the crown of a head is taken as flat; its knuckle is no case for these solutions
+  if (component.kind === 'head') return { shape: 'plate', thicknessMm, widthMm: null };
   return {
-    shape: 'cylinder',
+    shape: component.kind === 'sphere' ? 'sphere' : 'cylinder',
     thicknessMm,
     insideDiameterMm: {
       value: component.insideDiameterMm,
       provenance: 'certificate',
-      note: `Drawing ${component.drawingNo || 'not named'}`,
+      note: drawing,
     },
   };
+}
+
+/** The corner of a nozzle's bore, the edge of a hole, or without either the edge of a plate. */
+function cornerWall({ location }: AssessmentBasis, thicknessMm: Given, drawing: string): WallInput {
+  if (location.holeRadiusMm === null) return { shape: 'plate', thicknessMm, widthMm: null };
+  const holeRadiusMm: Given = {
+    value: location.holeRadiusMm,
+    provenance: 'certificate',
+    note: `${location.name}: ${drawing}`,
+  };
+  return location.kind === 'nozzle weld'
+    ? { shape: 'nozzle corner', thicknessMm, holeRadiusMm }
+    : { shape: 'hole edge', thicknessMm, holeRadiusMm, widthMm: null, flawedSides: 'one' };
 }
 
 function flawOf({ finding, inspection }: AssessmentBasis): FlawInput {

@@ -65,7 +65,7 @@ function lineSteps(subject: SheetSubject): CalculationStep[] {
 }
 
 function reserveSteps(subject: SheetSubject): CalculationStep[] {
-  const { flaw, point, limiting } = subject;
+  const { point } = subject;
   return [
     step('FL', 'Reserve factor on load', point.reserveOnLoad, '', {
       formula:
@@ -78,10 +78,21 @@ function reserveSteps(subject: SheetSubject): CalculationStep[] {
       source: 'algebra of the definition of Kr',
       inputs: [`f(Lr) = ${number(point.line)}`],
     }),
-    step('hlim', 'Limiting through-wall extent at this length', limiting.heightMm ?? 'none', 'mm', {
-      formula: 'first height that reaches the line, length unchanged',
-      source: limiting.because,
-      inputs: [`c = ${number(flaw.c)} mm`],
-    }),
+    limitingStep(subject),
   ];
+}
+
+function limitingStep({ flaw, limiting }: SheetSubject): CalculationStep {
+  const byLength = limiting.lengthMm !== null;
+  return step(
+    byLength ? 'llim' : 'hlim',
+    byLength ? 'Limiting length' : 'Limiting through-wall extent at this length',
+    limiting.heightMm ?? limiting.lengthMm ?? 'none',
+    'mm',
+    {
+      formula: 'first size that reaches the line, the other extent unchanged',
+      source: limiting.because,
+      inputs: [`a = ${number(flaw.a)} mm`, `c = ${number(flaw.c)} mm`],
+    },
+  );
 }

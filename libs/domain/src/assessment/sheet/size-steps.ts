@@ -1,7 +1,9 @@
+import { hasHeight, lengthIsOneSided } from '../../geometry/flaw-kind';
 import { PROXIMITY_RULE } from '../../growth/recategorise';
 import type { CalculationStep } from '../assessment-outcome';
 import type { SheetSubject } from '../calculation-sheet';
 import { number } from '../number-text';
+import { factorsOf } from '../partial-factors';
 import { stepIn } from './step-in';
 
 const ALLOWANCE = 'Sizing allowance of the technique, site rule';
@@ -13,31 +15,39 @@ export const sizeSteps = (subject: SheetSubject): CalculationStep[] => [
   ...categorySteps(subject),
 ];
 
-const heightWithAllowance = ({ input: { flaw, sizing } }: SheetSubject) =>
-  flaw.heightMm.value + sizing.heightAllowanceMm.value;
-
-function measuredSteps(subject: SheetSubject): CalculationStep[] {
-  const { flaw: measured, sizing } = subject.input;
-  const symbol = measured.kind === 'embedded' ? '2a' : 'a';
-  const height = heightWithAllowance(subject);
-  return [
-    step(symbol, 'Through-wall extent with allowance', height, 'mm', {
-      formula: 'measured + allowance',
-      source: ALLOWANCE,
-      inputs: [
-        `measured = ${number(measured.heightMm.value)} mm`,
-        `allowance = ${number(sizing.heightAllowanceMm.value)} mm`,
-      ],
-    }),
-    step('c', 'Half length with allowance', subject.flaw.c, 'mm', {
-      formula: '(measured + allowance)/2',
-      source: ALLOWANCE,
-      inputs: [
-        `measured 2c = ${number(measured.lengthMm.value)} mm`,
-        `allowance = ${number(sizing.lengthAllowanceMm.value)} mm`,
-      ],
-    }),
+function measuredSteps({ input, flaw }: SheetSubject): CalculationStep[] {
+  const { flaw: measured, sizing, wall } = input;
+  const { size } = factorsOf(input);
+  const oneSided = lengthIsOneSided(measured.kind, wall.shape);
+  const formula = size === 1 ? 'measured + allowance' : 'γ (measured + allowance)';
+  const inputs = (value: number, allowance: number) => [
+    `measured = ${number(value)} mm`,
+    `allowance = ${number(allowance)} mm`,
+    ...(size === 1 ? [] : [`γ = ${number(size)}`]),
   ];
+  const height = step(
+    measured.kind === 'embedded' ? '2a' : 'a',
+    'Through-wall extent with allowance',
+    flaw.sizedHeight,
+    'mm',
+    {
+      formula,
+      source: ALLOWANCE,
+      inputs: inputs(measured.heightMm.value, sizing.heightAllowanceMm.value),
+    },
+  );
+  const length = step(
+    oneSided ? 'c' : '2c',
+    oneSided ? 'Length from the edge with allowance' : 'Length with allowance',
+    flaw.sizedLength,
+    'mm',
+    {
+      formula,
+      source: ALLOWANCE,
+      inputs: inputs(measured.lengthMm.value, sizing.lengthAllowanceMm.value),
+    },
+  );
+  return hasHeight(measured.kind) ? [height, length] : [length];
 }
 
 function categorySteps(subject: SheetSubject): CalculationStep[] {
@@ -47,14 +57,14 @@ function categorySteps(subject: SheetSubject): CalculationStep[] {
       step('a', 'Depth as a surface flaw', flaw.a, 'mm', {
         formula: '2a + p',
         source: PROXIMITY_RULE,
-        inputs: [`2a = ${number(heightWithAllowance(subject))} mm`],
+        inputs: [`2a = ${number(flaw.sizedHeight)} mm`],
       }),
     ];
   }
-  if (flaw.kind === 'surface') return [];
+  if (flaw.kind !== 'embedded') return [];
   return [
     step('p', 'Ligament to the nearer face', section.ligament(flaw.a), 'mm', {
-      formula: 'measured − allowance/2, or t − 2a − that',
+      formula: 'measured − half of what the size grew, or t − 2a − that',
       source: ALLOWANCE,
       inputs: [`measured = ${number(input.flaw.ligamentMm?.value ?? 0)} mm`],
     }),

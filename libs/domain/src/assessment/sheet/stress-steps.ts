@@ -1,3 +1,9 @@
+import {
+  isCurved,
+  linearised,
+  profileOf,
+  type StressTerms,
+} from '../../fracture/stress-intensity/stress-terms';
 import { toMPaSqrtM } from '../../units/convert';
 import type { ResidualStressInput } from '../assessment-input';
 import type { CalculationStep } from '../assessment-outcome';
@@ -13,6 +19,11 @@ const RESIDUAL: Readonly<
     formula: 'min(σY, (1.4 − σref/σf) σY), σf = (σY + σU)/2',
     source: 'BS 7910:2013 7.1.8.2 (from memory)',
   },
+  'proof-tested': {
+    formula: 'min(σY, (1.4 − σref,proof/σf) σY), σref,proof of the wall without a flaw',
+    source: 'BS 7910:2013 7.1.8.2, relaxation by proof test (from memory)',
+  },
+  profile: { formula: 'Σ sₙ (x/t)ⁿ as entered, shown by its linear part', source: 'Input' },
   'heat-treated': {
     formula: '0.2 σY (flaw parallel to the weld), 0.3 σY (transverse)',
     source: 'BS 7910:2013 7.1.8.3 (from memory)',
@@ -31,10 +42,20 @@ const sizes = ({ section, flaw }: SheetSubject) => [
 ];
 
 const loads = ({ section: { flaw } }: SheetSubject) => [
-  `Pm = ${number(flaw.primaryMembrane)} MPa`,
-  `Pb = ${number(flaw.primaryBending)} MPa`,
+  ...loadTexts(flaw.primary),
   ...(flaw.facePressure > 0 ? [`p on the faces = ${number(flaw.facePressure)} MPa`] : []),
 ];
+
+/** Membrane and bending of the primary stress, and the polynomial where it has a curve. */
+function loadTexts(primary: StressTerms): string[] {
+  const { membrane, bending } = linearised(primary);
+  const terms = profileOf(primary).map((s, n) => `${number(s)}${n > 0 ? ` (x/t)^${n}` : ''}`);
+  return [
+    `Pm = ${number(membrane)} MPa`,
+    `Pb = ${number(bending)} MPa`,
+    ...(isCurved(primary) ? [`σ(x) = ${terms.join(' + ')} MPa`] : []),
+  ];
+}
 
 function referenceSteps(subject: SheetSubject): CalculationStep[] {
   const { referenceStress } = subject.section.evaluator.solutions;

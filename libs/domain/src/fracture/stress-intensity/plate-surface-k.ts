@@ -1,5 +1,5 @@
 import type { Crack } from '../../geometry/crack';
-import type { Limit } from '../../geometry/limit';
+import { DEPTH_RATIO, type Limit } from '../../geometry/limit';
 import type { Degrees } from '../../units/quantity';
 import { ASPECT_LIMIT, WIDTH_LIMIT } from './common-limits';
 import { angularFactor, shapeFactor } from './shape-factor';
@@ -14,7 +14,7 @@ const DEEP =
 export const PLATE_SURFACE_LIMITS: readonly Limit[] = [
   ASPECT_LIMIT,
   {
-    name: 'a/t',
+    name: DEPTH_RATIO,
     text: 'a/t ≤ 0.8',
     min: 0,
     max: 0.8,

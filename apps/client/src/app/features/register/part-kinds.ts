@@ -52,6 +52,7 @@ const LOCATION: readonly RecordField[] = [
   text('viewingDirection', 'Viewing direction'),
   choice('circumferenceOn', 'Distances around are measured on the', choicesOf(FACES)),
   number('lengthMm', 'Length of the weld, mm (may be left empty)'),
+  number('holeRadiusMm', 'Radius of the hole or nozzle bore, mm (only at the edge of one)'),
   choice('heatTreatment', 'Heat treatment', [
     { value: null, label: 'as the component' },
     ...choicesOf(HEAT_TREATMENTS),

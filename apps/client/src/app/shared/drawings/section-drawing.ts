@@ -1,6 +1,8 @@
+import type { FlawKind } from '@ligament/domain/geometry/flaw-kind';
+
 /** Shape of a flaw in the plane of the section, in millimetres of the wall. */
 export interface Outline {
-  readonly kind: 'surface' | 'embedded' | 'through-wall';
+  readonly kind: FlawKind;
   /** Face a surface flaw opens to. */
   readonly face: 'inside' | 'outside';
   readonly heightMm: number;
