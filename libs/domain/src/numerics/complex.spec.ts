@@ -31,10 +31,12 @@ describe('complex numbers', () => {
   it('give back the number when a root is squared', () => {
     fc.assert(
       fc.property(part, part, (re, im) => {
+        // a square that underflows has lost its digits before the root is taken
+        fc.pre(Math.hypot(re, im) > 1e-100);
         const root = squareRoot(complex(re, im), complex());
         expect(root.re).toBeGreaterThanOrEqual(0);
         multiply(root, root, root);
-        const size = Math.hypot(re, im) + 1e-300;
+        const size = Math.hypot(re, im);
         expect(Math.abs(root.re - re) / size).toBeLessThan(1e-14);
         expect(Math.abs(root.im - im) / size).toBeLessThan(1e-14);
       }),
