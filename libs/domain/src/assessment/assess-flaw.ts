@@ -63,6 +63,7 @@ function assessed(
     ...verdict,
     ...describeStanding(section, flaw, point),
     limitingHeightMm: limiting.heightMm,
+    limitingLengthMm: limiting.lengthMm,
     limitingBecause: limiting.because,
     path,
     events,

@@ -28,7 +28,7 @@ export const KINDS_OF_WALL: Readonly<Record<WallShape, readonly FlawKind[]>> = {
   plate: FLAW_KINDS,
   cylinder: ['surface', 'extended surface', 'embedded', 'through-wall'],
   sphere: ['surface', 'embedded', 'through-wall'],
-  'hole edge': ['surface', 'through-wall', 'corner'],
+  'hole edge': ['through-wall', 'corner'],
   'nozzle corner': ['corner'],
   'round bar': ['extended surface', 'embedded'],
 };

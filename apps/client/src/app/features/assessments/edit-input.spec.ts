@@ -66,6 +66,26 @@ describe('editing an input', () => {
     });
   });
 
+  it('gives each body its own members, and a flaw that it can hold', () => {
+    const hole = choose(shell, 'wall.shape', 'hole edge', null);
+    expect(hole.wall).toMatchObject({ shape: 'hole edge', widthMm: null, flawedSides: 'one' });
+    expect(hole.flaw.kind).toBe('through-wall');
+    const corner = choose(hole, 'flaw.kind', 'corner', null);
+    expect(choose(corner, 'wall.shape', 'nozzle corner', null).flaw.kind).toBe('corner');
+    expect(choose(shell, 'wall.shape', 'sphere', null).wall).toMatchObject({
+      shape: 'sphere',
+      insideDiameterMm: { value: 2600 },
+    });
+    expect(choose(shell, 'wall.shape', 'round bar', null).flaw.kind).toBe('extended surface');
+  });
+
+  it('takes an attachment out with its weld toe', () => {
+    const path = 'stress.weldToe.attachmentLengthMm';
+    const on = include(shell, path, true, null);
+    expect(given(valueAt(on, path))?.value).toBeNaN();
+    expect(include(on, path, false, null).stress.weldToe).toBeNull();
+  });
+
   it('gives each residual stress its own members', () => {
     const residual = (state: string) =>
       choose(shell, 'stress.residual.state', state, null).stress.residual;

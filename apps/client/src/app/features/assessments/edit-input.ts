@@ -1,4 +1,5 @@
 import type { AssessmentInput, WallInput } from '@ligament/domain/assessment/assessment-input';
+import { FLAW_KINDS, KINDS_OF_WALL } from '@ligament/domain/geometry/flaw-kind';
 import type { Given } from '@ligament/domain/units/provenance';
 
 /** Reads the member at a path, e.g. `material.yieldMPa`; undefined where the case has none. */
@@ -28,6 +29,13 @@ const isRecord = (data: unknown): data is Readonly<Record<string, unknown>> =>
 /** An input nobody has given yet: empty, so that nothing is computed with it. */
 const empty = (note = ''): Given => ({ value: Number.NaN, provenance: 'assumed', note });
 
+/** A stress through the wall nobody has given yet. */
+export const emptyProfile = (): Given<readonly number[]> => ({
+  value: [Number.NaN],
+  provenance: 'assumed',
+  note: '',
+});
+
 /**
  * A copy of the input with another word chosen; members that the other case needs come from the register where it has
  * them, and are left empty where it has not.
@@ -39,25 +47,30 @@ export function choose(
   register: AssessmentInput | null,
 ): AssessmentInput {
   switch (path) {
-    case 'wall.shape':
-      return { ...input, wall: wallOf(input, word, register) };
-    case 'flaw.kind': {
-      const embedded = word === 'embedded';
-      const known = register?.flaw.ligamentMm ?? null;
-      return {
-        ...input,
-        flaw: {
-          ...input.flaw,
-          kind: embedded ? 'embedded' : 'surface',
-          ligamentMm: embedded ? (input.flaw.ligamentMm ?? known ?? empty()) : null,
-        },
-      };
+    case 'wall.shape': {
+      const wall = wallOf(input, word, register);
+      const kinds = KINDS_OF_WALL[wall.shape];
+      const kept = kinds.includes(input.flaw.kind) ? input.flaw.kind : (kinds[0] ?? 'surface');
+      return ofKind({ ...input, wall }, kept, register);
     }
+    case 'flaw.kind':
+      return ofKind(input, word, register);
     case 'stress.residual.state':
       return setAt(input, 'stress.residual', residualOf(word));
     default:
       return setAt(input, path, word);
   }
+}
+
+function ofKind(
+  input: AssessmentInput,
+  word: string,
+  register: AssessmentInput | null,
+): AssessmentInput {
+  const kind = FLAW_KINDS.find((each) => each === word) ?? input.flaw.kind;
+  const known = register?.flaw.ligamentMm ?? null;
+  const ligamentMm = kind === 'embedded' ? (input.flaw.ligamentMm ?? known ?? empty()) : null;
+  return { ...input, flaw: { ...input.flaw, kind, ligamentMm } };
 }
 
 function wallOf(
@@ -66,15 +79,32 @@ function wallOf(
   register: AssessmentInput | null,
 ): WallInput {
   const { thicknessMm } = wall;
-  if (shape === 'plate') return { shape: 'plate', thicknessMm, widthMm: null };
-  const known = register?.wall.shape === 'cylinder' ? register.wall.insideDiameterMm : empty();
-  return { shape: 'cylinder', thicknessMm, insideDiameterMm: known };
+  const known = register?.wall;
+  const holeRadiusMm = known && 'holeRadiusMm' in known ? known.holeRadiusMm : empty();
+  switch (shape) {
+    case 'plate':
+    case 'round bar':
+      return shape === 'plate' ? { shape, thicknessMm, widthMm: null } : { shape, thicknessMm };
+    case 'hole edge':
+      return { shape, thicknessMm, holeRadiusMm, widthMm: null, flawedSides: 'one' };
+    case 'nozzle corner':
+      return { shape, thicknessMm, holeRadiusMm };
+    default: {
+      const round = [wall, known].find((each) => each && 'insideDiameterMm' in each);
+      const insideDiameterMm =
+        round && 'insideDiameterMm' in round ? round.insideDiameterMm : empty();
+      return { shape: shape === 'sphere' ? 'sphere' : 'cylinder', thicknessMm, insideDiameterMm };
+    }
+  }
 }
 
 function residualOf(state: string): AssessmentInput['stress']['residual'] {
   switch (state) {
     case 'entered':
+    case 'proof-tested':
       return { state, membraneMPa: empty(), bendingMPa: empty() };
+    case 'profile':
+      return { state, profileMPa: emptyProfile() };
     case 'heat-treated':
       return { state, flawToWeld: 'parallel' };
     case 'as-welded':
@@ -90,8 +120,12 @@ export const include = (
   path: string,
   included: boolean,
   register: AssessmentInput | null,
-): AssessmentInput =>
-  setAt(input, path, included ? (given(register && valueAt(register, path)) ?? empty()) : null);
+): AssessmentInput => {
+  // an optional member of an optional group goes with its group
+  const whole = path.startsWith('stress.weldToe.') && !included ? 'stress.weldToe' : path;
+  const known = given(register && valueAt(register, path));
+  return setAt(input, whole, included ? (known ?? empty()) : null);
+};
 
 /** The member as an input with its origin; null where it is none. */
 export function given(value: unknown): Given | null {

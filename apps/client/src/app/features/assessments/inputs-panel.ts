@@ -3,15 +3,16 @@ import type { AssessmentInput } from '@ligament/domain/assessment/assessment-inp
 import type { GrowthLawView } from '@ligament/domain/contract/growth-laws';
 import type { Given } from '@ligament/domain/units/provenance';
 import { inputName } from '../../shared/assessed/input-names';
-import { choose, given, include, setAt, valueAt } from './edit-input';
+import { choose, emptyProfile, given, include, setAt, valueAt } from './edit-input';
 import { GivenField } from './given-field';
 import { GrowthFields } from './growth-fields';
+import { ProfileField } from './profile-field';
 import { type InputField, inputGroups, type Option } from './input-groups';
 
 /** Every input of an assessment, in groups, each with its origin; to edit or to read. */
 @Component({
   selector: 'app-inputs-panel',
-  imports: [GivenField, GrowthFields],
+  imports: [GivenField, GrowthFields, ProfileField],
   templateUrl: './inputs-panel.html',
   styleUrl: './inputs-panel.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -30,6 +31,15 @@ export class InputsPanel {
 
   protected givenAt(path: string): Given | null {
     return given(valueAt(this.input(), path));
+  }
+
+  protected profileAt(path: string): Given<readonly number[]> | null {
+    const value = given(valueAt(this.input(), path)) as Given<unknown> | null;
+    return value && Array.isArray(value.value) ? (value as Given<readonly number[]>) : null;
+  }
+
+  protected setProfile(path: string, included: boolean): void {
+    this.set(path, included ? emptyProfile() : null);
   }
 
   protected registerAt(path: string): Given | null {

@@ -29,15 +29,14 @@ export function assessLive({ input, inspectedOn, mechanism, rules }: LiveSubject
   const read = assessmentInput.safeParse(input);
   if (!read.success) {
     const messages = read.error.issues.map(
-      ({ path, message }) =>
-        [path.join('.').replace(/\.(value|note|provenance)$/, ''), message] as const,
+      ({ path, message }) => [fieldOf(path.join('.')), message] as const,
     );
     return { input, outcome: null, proposal: null, messages: new Map([...messages].reverse()) };
   }
   const outcome = assessFlaw(read.data);
   if (outcome.status === 'refused') {
     const messages = outcome.refusals.map(
-      ({ input: path, limit, message }) => [path, `${message} (limit: ${limit})`] as const,
+      ({ input: path, limit, message }) => [fieldOf(path), `${message} (limit: ${limit})`] as const,
     );
     return { input, outcome, proposal: null, messages: new Map(messages) };
   }
@@ -46,6 +45,9 @@ export function assessLive({ input, inspectedOn, mechanism, rules }: LiveSubject
     : null;
   return { input, outcome, proposal: proposal && copyOf(proposal), messages: new Map() };
 }
+
+/** The field on screen that holds the member at fault: a value and all its places are one field. */
+const fieldOf = (path: string): string => path.replace(/\.(value|note|provenance)(\..*)?$/, '');
 
 /** The proposal as it travels. */
 function copyOf(proposal: ReturnType<typeof proposeReinspection>): ReinspectionProposalView {

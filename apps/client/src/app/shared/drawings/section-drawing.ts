@@ -7,6 +7,8 @@ export interface Outline {
   readonly face: 'inside' | 'outside';
   readonly heightMm: number;
   readonly lengthMm: number;
+  /** Its length is measured from an edge or a hole, where the wall begins. */
+  readonly oneSided: boolean;
   /** Middle of an embedded flaw, from the inside surface. */
   readonly middleMm: number | null;
 }

@@ -6,6 +6,7 @@ const surface = (heightMm: number, lengthMm: number, face: 'inside' | 'outside' 
   face,
   heightMm,
   lengthMm,
+  oneSided: false,
   middleMm: null,
   label: `${heightMm} mm`,
 });
@@ -109,6 +110,37 @@ describe('sectionGeometry', () => {
     expect(long.cut).toBe(true);
     expect(long.wall.bottom - long.wall.top).toBeGreaterThanOrEqual(63.9);
     expect(sectionGeometry(drawing(), 900).cut).toBe(false);
+  });
+
+  it('draws a corner flaw from the edge where the wall begins', () => {
+    const corner = { ...surface(5, 4), kind: 'corner' as const, oneSided: true };
+    const parts = { measured: corner, assessed: corner, expected: null, limiting: null };
+    const { outlines, wall, scale, length, ligament } = sectionGeometry(drawing(parts), 900);
+    expect(wall.left).toBeGreaterThan(0);
+    expect(outlines.at(-1)?.path).toMatch(new RegExp(`^M ${wall.left} `));
+    expect(length.x1).toBeCloseTo(wall.left, 6);
+    expect(length.x2 - length.x1).toBeCloseTo(4 * scale, 6);
+    expect(length.text).toBe('c 4 mm');
+    expect(ligament?.text).toBe('ligament 23 mm');
+  });
+
+  it('draws a flaw through the wall over its whole height and without a ligament', () => {
+    const through = { ...surface(28, 60), kind: 'through-wall' as const };
+    const parts = { measured: through, assessed: through, expected: null, limiting: null };
+    const { outlines, wall, ligament } = sectionGeometry(drawing(parts), 900);
+    const path = outlines.at(-1)?.path ?? '';
+    expect(path).toContain(` ${wall.top} H`);
+    expect(path).toContain(`V ${wall.bottom}`);
+    expect(ligament).toBeNull();
+  });
+
+  it('draws a flaw without end from side to side', () => {
+    const endless = { ...surface(5, 900), kind: 'extended surface' as const };
+    const parts = { measured: endless, assessed: endless, expected: null, limiting: null };
+    const { outlines, wall, length, cut } = sectionGeometry(drawing(parts), 900);
+    expect(outlines.at(-1)?.path).toMatch(new RegExp(`^M ${wall.left} .* H ${wall.right} `));
+    expect(length.text).toBe('full length');
+    expect(cut).toBe(false);
   });
 
   it('states a round length on the scale bar and draws it to that length', () => {

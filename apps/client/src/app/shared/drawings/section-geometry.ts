@@ -1,7 +1,7 @@
 import { type Box } from './place-labels';
 import type { NamedOutline, Outline, SectionDrawing } from './section-drawing';
 import { roundStep } from './axis-ticks';
-import { type Frame, yOf } from './section-frame';
+import { type Frame, goesThrough, opensToFace, reachOf, yOf } from './section-frame';
 import { leaderLabels, type LeaderLabel, type Part } from './section-leaders';
 
 export interface DrawnOutline {
@@ -43,14 +43,19 @@ const THINNEST_WALL = 64;
 const LABEL_ROOM = 226;
 const WIDE = 600;
 const BAND = 44;
+/** What is drawn beside an edge of the wall. */
+const EDGE_ROOM = 46;
 
 export function sectionGeometry(drawing: SectionDrawing, width: number): SectionGeometry {
   const parts = partsOf(drawing);
-  const longest = Math.max(...parts.map(([, { lengthMm }]) => lengthMm));
+  const oneSided = drawing.measured.oneSided;
+  const longest = Math.max(...parts.map(([, outline]) => drawnLength(outline, drawing.wallMm)));
   const { room, scale } = fit(longest, drawing.wallMm, width);
   const labelled = room < width;
-  const wall = { left: 0, right: width, top: BAND, bottom: BAND + drawing.wallMm * scale };
-  const frame: Frame = { wallMm: drawing.wallMm, scale, wall, middleX: room / 2, edge: room };
+  const left = oneSided ? EDGE_ROOM : 0;
+  const wall = { left, right: width, top: BAND, bottom: BAND + drawing.wallMm * scale };
+  const middleX = oneSided ? left : room / 2;
+  const frame: Frame = { wallMm: drawing.wallMm, scale, wall, middleX, edge: room };
   return {
     width,
     height: wall.bottom + BAND + 26,
@@ -66,9 +71,13 @@ export function sectionGeometry(drawing: SectionDrawing, width: number): Section
     ligament: ligamentOf(drawing.assessed, drawing.wallMm, frame),
     length: lengthOf(drawing.measured, frame),
     scaleBar: scaleBarOf(drawing.wallMm, frame, width),
-    cut: longest * scale > room,
+    cut: longest * scale > room - left,
   };
 }
+
+/** Length the drawing has to hold: of a flaw without end, what shows that it has none. */
+const drawnLength = ({ kind, lengthMm }: Outline, wallMm: number): number =>
+  kind === 'extended surface' ? 2 * wallMm : lengthMm;
 
 /** Room for the flaw and the scale that fills it, with labels beside it where the wall stays thick enough. */
 function fit(longestMm: number, wallMm: number, width: number) {
@@ -93,19 +102,26 @@ function partsOf(drawing: SectionDrawing): (readonly [Part, NamedOutline])[] {
     .sort(([, a], [, b]) => b.heightMm - a.heightMm);
 }
 
-/** Outline as an SVG path: half an ellipse on a face, a whole one in the wall, or the wall's full height. */
+/** Outline as an SVG path: half or a quarter of an ellipse on a face, a whole one in the wall, or a band. */
 function outlinePath(outline: Outline, frame: Frame): string {
   const { scale, wall, middleX } = frame;
-  const half = (outline.lengthMm * scale) / 2;
-  const [left, right] = [text(middleX - half), text(middleX + half)];
-  if (outline.kind === 'through-wall') {
+  const half = reachOf(outline) * scale;
+  const [left, right] = [text(outline.oneSided ? middleX : middleX - half), text(middleX + half)];
+  if (goesThrough(outline)) {
     return `M ${left} ${text(wall.top)} H ${right} V ${text(wall.bottom)} H ${left} Z`;
   }
-  if (outline.kind === 'surface') {
+  if (opensToFace(outline)) {
     const inside = outline.face === 'inside';
     const y = text(inside ? wall.bottom : wall.top);
-    const radii = `${text(half)} ${text(outline.heightMm * scale)}`;
-    return `M ${left} ${y} A ${radii} 0 0 ${inside ? 1 : 0} ${right} ${y} Z`;
+    const deep = outline.heightMm * scale;
+    const tip = text(inside ? wall.bottom - deep : wall.top + deep);
+    if (outline.kind === 'extended surface') {
+      return `M ${text(wall.left)} ${y} V ${tip} H ${text(wall.right)} V ${y} Z`;
+    }
+    const radii = `${text(half)} ${text(deep)}`;
+    return outline.oneSided
+      ? `M ${left} ${y} V ${tip} A ${radii} 0 0 ${inside ? 1 : 0} ${right} ${y} Z`
+      : `M ${left} ${y} A ${radii} 0 0 ${inside ? 1 : 0} ${right} ${y} Z`;
   }
   const y = text(yOf(outline.middleMm ?? 0, frame));
   const radii = `${text(half)} ${text((outline.heightMm * scale) / 2)}`;
@@ -119,14 +135,16 @@ function ligamentOf(assessed: Outline, wallMm: number, frame: Frame): Dimension 
   const [from, to] = ligamentEnds(assessed, wallMm);
   const left = Math.abs(to - from);
   if (left <= 0) return null;
-  const { middleX: x } = frame;
+  // the ligament of a corner flaw is measured along the edge, drawn a little beside it
+  const x = assessed.oneSided ? frame.middleX + 6 : frame.middleX;
   const words = `ligament ${Math.round(left * 10) / 10} mm`;
   return { x1: x, y1: yOf(from, frame), x2: x, y2: yOf(to, frame), text: words };
 }
 
-function ligamentEnds({ kind, face, heightMm, middleMm }: Outline, wallMm: number) {
-  if (kind === 'through-wall') return [0, 0] as const;
-  if (kind === 'surface') {
+function ligamentEnds(outline: Outline, wallMm: number) {
+  const { face, heightMm, middleMm } = outline;
+  if (goesThrough(outline)) return [0, 0] as const;
+  if (opensToFace(outline)) {
     return face === 'inside' ? ([heightMm, wallMm] as const) : ([wallMm - heightMm, 0] as const);
   }
   const [low, high] = [(middleMm ?? 0) - heightMm / 2, (middleMm ?? 0) + heightMm / 2];
@@ -134,16 +152,21 @@ function ligamentEnds({ kind, face, heightMm, middleMm }: Outline, wallMm: numbe
 }
 
 /** Length of the measured flaw, drawn outside the wall on the flaw's side. */
-function lengthOf({ kind, face, lengthMm }: NamedOutline, frame: Frame): Dimension {
-  const half = (lengthMm * frame.scale) / 2;
-  const above = kind === 'surface' && face === 'outside';
+function lengthOf(measured: NamedOutline, frame: Frame): Dimension {
+  const { kind, face, lengthMm, oneSided } = measured;
+  const endless = kind === 'extended surface';
+  const half = endless ? (frame.edge - 24) / 2 : reachOf(measured) * frame.scale;
+  const above = opensToFace(measured) && face === 'outside';
   const y = above ? frame.wall.top - 26 : frame.wall.bottom + 29;
+  const words = endless
+    ? 'full length'
+    : `${oneSided ? 'c' : '2c'} ${Math.round(lengthMm * 10) / 10} mm`;
   return {
-    x1: frame.middleX - half,
+    x1: oneSided ? frame.middleX : frame.middleX - half,
     x2: frame.middleX + half,
     y1: y,
     y2: y,
-    text: `2c ${Math.round(lengthMm * 10) / 10} mm`,
+    text: words,
   };
 }
 

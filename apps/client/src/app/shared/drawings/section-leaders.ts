@@ -1,5 +1,5 @@
 import type { NamedOutline, Outline } from './section-drawing';
-import { type Frame, yOf } from './section-frame';
+import { type Frame, goesThrough, reachOf, yOf } from './section-frame';
 import { spreadLabels } from './spread-labels';
 
 /** The part an outline plays in the drawing. */
@@ -57,7 +57,7 @@ function leaderPlace(
   const places = angles.map((angle) => {
     const radians = (angle * Math.PI) / 180;
     return {
-      alongMm: (outline.lengthMm / 2) * Math.cos(radians),
+      alongMm: reachOf(outline) * Math.cos(radians),
       upMm: heightAt(outline, Math.sin(radians), wallMm),
     };
   });
@@ -66,12 +66,13 @@ function leaderPlace(
 }
 
 function holds(
-  { kind, face, heightMm, lengthMm, middleMm }: Outline,
+  outline: Outline,
   { alongMm, upMm }: { readonly alongMm: number; readonly upMm: number },
   wallMm: number,
 ): boolean {
-  const along = alongMm / (lengthMm / 2);
-  if (kind === 'through-wall') return Math.abs(along) < 1;
+  const { kind, face, heightMm, middleMm } = outline;
+  const along = kind === 'extended surface' ? 0 : alongMm / reachOf(outline);
+  if (goesThrough(outline)) return Math.abs(along) < 1;
   const [centre, radius] =
     kind === 'embedded'
       ? [middleMm ?? 0, heightMm / 2]
