@@ -34,6 +34,7 @@ const TAIL = {
 const ONE_OVER_ROOT_PI = 0.56418958354775628695;
 const CENTRE_END = 0.46875;
 const MIDDLE_END = 4;
+const UNDERFLOW = 27;
 
 /**
  * Error function erf(x) = (2/√π) ∫₀ˣ exp(−t²) dt.
@@ -66,6 +67,7 @@ export function erfc(x: number): number {
 const centre = (y: number) => polynomialRatio(y * y, CENTRE.numerator, CENTRE.denominator);
 
 function upper(y: number): number {
+  if (y > UNDERFLOW) return 0;
   if (y <= MIDDLE_END) {
     return squaredExponential(y) * polynomialRatio(y, MIDDLE.numerator, MIDDLE.denominator);
   }

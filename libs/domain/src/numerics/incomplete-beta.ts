@@ -36,7 +36,7 @@ export function betaBelow(x: number, a: number, b: number): number {
  * @example betaQuantile(0.05, 29, 1) // 0.9018558879
  */
 export const betaQuantile = (p: number, a: number, b: number): number =>
-  findRoot((x) => betaBelow(x, a, b) - p, 0, 1, { tolerance: 1e-14 }).x;
+  findRoot((x) => betaBelow(x, a, b) - p, 0, 1, { tolerance: Number.MIN_VALUE }).x;
 
 function fraction(x: number, a: number, b: number): number {
   let c = 1;
