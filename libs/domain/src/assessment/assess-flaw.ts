@@ -1,20 +1,19 @@
 import type { AssessmentInput } from './assessment-input';
-import type { AssessedFlaw, AssessmentOutcome, Refusal } from './assessment-outcome';
+import type { AssessedFlaw, AssessmentOutcome } from './assessment-outcome';
 import { calculationSheet } from './calculation-sheet';
 import { cautions } from './cautions';
-import { characterise, type CharacterisedFlaw } from './characterise';
-import { checkInput } from './check-input';
-import { validityChecks, validityRefusals } from './check-validity';
+import type { CharacterisedFlaw } from './characterise';
+import { validityChecks } from './check-validity';
 import { describeStanding } from './describe-standing';
 import { driversOf } from './drivers';
 import { ENGINE_VERSION } from './engine-version';
-import { flawCase } from './flaw-case';
 import { followGrowth } from './follow-growth';
 import { cyclesPerYear, stateOf } from './growth-states';
 import { limitingSize } from './limiting-size';
 import { listAssumed } from './list-assumed';
 import { NO_LIFE, remainingLife } from './remaining-life';
-import { sectionOf, type Section } from './section';
+import { prepareCase } from './prepare-case';
+import type { Section } from './section';
 import { standing } from './standing';
 import { judge } from './verdict';
 
@@ -25,20 +24,11 @@ export { ENGINE_VERSION } from './engine-version';
  * sheet, or a refusal that names input, limit and value. Pure: the same input gives the same answer.
  */
 export function assessFlaw(input: AssessmentInput): AssessmentOutcome {
-  const impossible = checkInput(input);
-  if (impossible.length > 0) return refused(impossible);
-  const flaw = characterise(input);
-  const section = sectionOf(flawCase(input), flaw);
-  const crack = section.crackAt(flaw.a, flaw.c);
-  const outside = validityRefusals(section.limits, crack);
-  return outside.length > 0 ? refused(outside) : assessed(input, flaw, section);
+  const prepared = prepareCase(input);
+  return prepared.status === 'refused'
+    ? prepared
+    : assessed(input, prepared.flaw, prepared.section);
 }
-
-const refused = (refusals: readonly Refusal[]): AssessmentOutcome => ({
-  status: 'refused',
-  engineVersion: ENGINE_VERSION,
-  refusals,
-});
 
 function assessed(
   input: AssessmentInput,
