@@ -21,6 +21,8 @@ describe('the engine against published values', () => {
     expect([...new Set(CHECK_ROWS.map(({ group }) => group))]).toEqual([
       'Units',
       'Stress from pressure',
+      'Stress raisers',
+      'Crack-tip field',
       'Stress intensity',
       'Stress intensity against finite elements',
       'Reference stress',

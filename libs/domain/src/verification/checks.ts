@@ -8,12 +8,16 @@ import { LIMITING_SIZE_CHECKS } from './limiting-size-checks';
 import { PRESSURE_CHECKS } from './pressure-checks';
 import { REFERENCE_STRESS_CHECKS } from './reference-stress-checks';
 import { STRESS_INTENSITY_CHECKS } from './stress-intensity-checks';
+import { STRESS_RAISER_CHECKS } from './stress-raiser-checks';
+import { TIP_FIELD_CHECKS } from './tip-field-checks';
 import { UNIT_CHECKS } from './unit-checks';
 
 /** Every value the engine is checked against, in the order of the computation. */
 export const CHECK_ROWS: readonly CheckRow[] = [
   ...UNIT_CHECKS,
   ...PRESSURE_CHECKS,
+  ...STRESS_RAISER_CHECKS,
+  ...TIP_FIELD_CHECKS,
   ...STRESS_INTENSITY_CHECKS,
   ...CURVATURE_CHECKS,
   ...REFERENCE_STRESS_CHECKS,
