@@ -1,17 +1,7 @@
 import type { FlawKind } from '../geometry/flaw-kind';
+import type { Refusal } from '../geometry/refusal';
 
-/** Why no verdict is given: which input breaks which limit, and what can be done instead. */
-export interface Refusal {
-  /** Path of the input at fault, e.g. `flaw.heightMm`. */
-  readonly input: string;
-  /** The limit in words and figures, e.g. `a/t ≤ 0.8`. */
-  readonly limit: string;
-  /** The value it got, already in the unit of the limit. */
-  readonly value: number | string | null;
-  readonly message: string;
-  /** What to do instead: another method, a specialist, a repair. */
-  readonly instead: string;
-}
+export type { Refusal };
 
 /** One limit of a published solution, as met or not by this case. */
 export interface ValidityCheck {

@@ -38,6 +38,7 @@ import { DeskActions } from './desk-actions';
 import { DifferencePanel } from './difference-panel';
 import { DueDatePanel } from './due-date-panel';
 import { InputsPanel } from './inputs-panel';
+import { Insights } from './insights/insights';
 import type { HasUnsaved } from './keep-unsaved';
 import { ResultsPanel } from './results-panel';
 import { ReviewPanel } from './review-panel';
@@ -63,6 +64,7 @@ import { SignaturesPanel } from './signatures-panel';
     FigureStrip,
     AssessedDrawings,
     InputsPanel,
+    Insights,
     ResultsPanel,
     DueDatePanel,
     DifferencePanel,

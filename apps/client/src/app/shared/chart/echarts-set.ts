@@ -1,5 +1,5 @@
 // The parts of ECharts that our charts use; loaded only with the first chart.
-import { CustomChart, LineChart, ScatterChart } from 'echarts/charts';
+import { BarChart, CustomChart, LineChart, ScatterChart } from 'echarts/charts';
 import {
   GridComponent,
   MarkAreaComponent,
@@ -11,6 +11,7 @@ import { init, use } from 'echarts/core';
 import { SVGRenderer } from 'echarts/renderers';
 
 use([
+  BarChart,
   CustomChart,
   LineChart,
   ScatterChart,
