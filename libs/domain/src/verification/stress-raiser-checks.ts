@@ -9,14 +9,10 @@ import {
 } from '../fracture/stress-raisers/hole-edge';
 import { kirschField, kirschPolar } from '../fracture/stress-raisers/kirsch-field';
 import type { RemoteLoad } from '../fracture/stress-raisers/remote-load';
-import {
-  ellipseInStrip,
-  holeInStrip,
-  holeInStripHeywood,
-} from '../fracture/stress-raisers/strip-factors';
 import { noStress } from '../fracture/stress-state';
 import { degrees, mm, mpa } from '../units/quantity';
 import type { CheckKind, CheckRow } from './check-row';
+import { STRIP_FACTOR_CHECKS } from './strip-factor-checks';
 
 const row = (
   id: string,
@@ -119,47 +115,6 @@ const limits = (['xx', 'yy', 'xy'] as const).map((part, i) =>
     'exact limit',
     'Kirsch’s field: the hole is the limit of the ellipse',
     () => ellipseAt(2, 2, part),
-  ),
-);
-
-const HOWLAND = [
-  [0, 3],
-  [0.1, 3.03],
-  [0.2, 3.14],
-  [0.3, 3.36],
-  [0.4, 3.74],
-  [0.5, 4.32],
-] as const;
-const strips = HOWLAND.flatMap(([share, gross], i) => [
-  row(
-    `SR-H${i + 1}`,
-    `gross peak factor of a hole in a strip, d/W = ${share}`,
-    gross,
-    0.006,
-    'from memory',
-    'Howland 1930, table (from memory)',
-    () => holeInStrip(share).gross,
-  ),
-  row(
-    `SR-W${i + 1}`,
-    `the same by Heywood’s form, d/W = ${share}`,
-    gross,
-    0.02,
-    'from memory',
-    'Howland 1930, table (from memory)',
-    () => holeInStripHeywood(share).gross,
-  ),
-]);
-
-const ellipseStrips = [0.5, 1, 4, 10].map((slenderness, i) =>
-  row(
-    `SR-E${i + 1}`,
-    `net peak factor of an ellipse in a very wide strip, A/B = ${slenderness}`,
-    1 + 2 * slenderness,
-    1e-12,
-    'exact limit',
-    'Inglis 1913, the strip without end',
-    () => ellipseInStrip(slenderness, 0).net,
   ),
 );
 
@@ -272,8 +227,7 @@ export const STRESS_RAISER_CHECKS: readonly CheckRow[] = [
   ...biaxial,
   ...inglis,
   ...limits,
-  ...strips,
-  ...ellipseStrips,
+  ...STRIP_FACTOR_CHECKS,
   ...ligament,
   ...others,
 ];
