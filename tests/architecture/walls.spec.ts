@@ -12,7 +12,7 @@ const MAY: Readonly<Record<string, readonly string[]>> = {
   'domain/materials': ['domain/units', 'domain/assessment-types'],
   'domain/geometry': ['domain/units'],
   'domain/fracture': ['domain/units', 'domain/numerics', 'domain/materials', 'domain/geometry'],
-  'domain/growth': ['domain/units', 'domain/numerics', 'domain/materials'],
+  'domain/growth': ['domain/units', 'domain/numerics', 'domain/materials', 'domain/geometry'],
   'domain/probability': ['domain/units', 'domain/numerics', 'domain/materials', 'domain/geometry'],
   'domain/assessment': [
     'domain/assessment-types',
