@@ -1,0 +1,190 @@
+import fc from 'fast-check';
+import { monthsAfter } from './calendar-date';
+import { governingInterval, wholeMonths, type IntervalOutcome } from './interval-outcome';
+import {
+  factoredLifeInterval,
+  growthWindowInterval,
+  PIPING_CLASSES,
+  pipingThicknessInterval,
+  pipingVisualInterval,
+  vesselExternalInterval,
+  vesselInternalInterval,
+} from './interval-rules';
+import { corrosionRates, thinningLife } from './thinning-life';
+
+const lives = fc.double({ min: -20, max: 80, noNaN: true });
+const yearsOf = (outcome: IntervalOutcome) =>
+  outcome.status === 'interval' ? outcome.years : outcome.status;
+
+describe('the interval of a vessel', () => {
+  it.each([
+    [15, 7.5],
+    [30, 10],
+    [4, 2],
+    [3.9, 2],
+    [1.5, 1.5],
+    [0, 'overdue'],
+    [-3, 'overdue'],
+  ])('with a remaining life of %d years is %p', (life, expected) => {
+    expect(yearsOf(vesselInternalInterval(life))).toBe(expected);
+  });
+
+  it('outside is five years at most', () => {
+    expect(yearsOf(vesselExternalInterval(30))).toBe(5);
+    expect(yearsOf(vesselExternalInterval(6))).toBe(3);
+    expect(yearsOf(vesselExternalInterval(-1))).toBe('overdue');
+  });
+});
+
+describe('the interval of piping', () => {
+  it.each([
+    [1, 15, 5],
+    [2, 15, 7.5],
+    [2, 30, 10],
+    [3, 15, 7.5],
+    [1, 0, 'overdue'],
+    [4, 15, 'not required'],
+  ] as const)('of class %d with a life of %d years is %p', (pipingClass, life, expected) => {
+    expect(yearsOf(pipingThicknessInterval(pipingClass, life))).toBe(expected);
+  });
+
+  it('seen from outside depends on the class alone', () => {
+    expect(PIPING_CLASSES.map((each) => yearsOf(pipingVisualInterval(each)))).toEqual([
+      5,
+      5,
+      10,
+      'not required',
+    ]);
+  });
+});
+
+describe('every rule', () => {
+  const rules = fc.constantFrom(
+    vesselInternalInterval,
+    vesselExternalInterval,
+    (life: number) => pipingThicknessInterval(1, life),
+    growthWindowInterval,
+    (life: number) => factoredLifeInterval(life, 3),
+  );
+
+  it('never gives an interval below 0 or beyond the life, and calls a spent life overdue', () => {
+    fc.assert(
+      fc.property(rules, lives, (rule, life) => {
+        const outcome = rule(life);
+        expect(outcome.status).toBe(life > 0 ? 'interval' : 'overdue');
+        if (outcome.status !== 'interval') return;
+        expect(outcome.years).toBeLessThanOrEqual(life);
+        expect(outcome.months).toBeGreaterThanOrEqual(0);
+        expect(outcome.months / 12).toBeLessThanOrEqual(outcome.years + 1e-9);
+      }),
+    );
+  });
+
+  it('says where it comes from', () => {
+    fc.assert(
+      fc.property(rules, lives, (rule, life) => {
+        const outcome = rule(life);
+        expect(outcome.status !== 'refused' && outcome.source).toMatch(
+          /from memory|Eurocode 9|API 570|common practice/,
+        );
+      }),
+    );
+  });
+
+  it.each([Number.NaN, Infinity, 5000])('refuses a life of %d years by name', (life) => {
+    for (const rule of [vesselInternalInterval, vesselExternalInterval, growthWindowInterval]) {
+      const outcome = rule(life);
+      expect(outcome.status === 'refused' && outcome.refusals[0]?.input).toMatch(
+        /remainingLifeYears|detectableToCriticalYears/,
+      );
+    }
+    expect(pipingThicknessInterval(2, life).status).toBe('refused');
+    expect(factoredLifeInterval(life, 2).status).toBe('refused');
+  });
+
+  it('refuses a factor on life below 1', () => {
+    const outcome = factoredLifeInterval(10, 0.5);
+    expect(outcome.status === 'refused' && outcome.refusals[0]?.input).toBe('factorOnLife');
+  });
+});
+
+describe('whole months', () => {
+  it.each([
+    [9.35, 112],
+    [5.6, 67],
+    [7, 84],
+    [7 / 12, 7],
+    [0.05, 0],
+    [-1, 0],
+  ])('in %d years are %d, rounded down', (years, months) => {
+    expect(wholeMonths(years)).toBe(months);
+  });
+
+  it('lead to a date that is never late', () => {
+    expect(monthsAfter('2003-05-31', wholeMonths(5.6))).toBe('2008-12-31');
+  });
+});
+
+describe('several rules together', () => {
+  it('are governed by the shortest, by what is overdue before that, by a refusal first', () => {
+    const [short, long] = [vesselInternalInterval(3), vesselInternalInterval(20)];
+    const [late, optional] = [vesselInternalInterval(0), pipingVisualInterval(4)];
+    const refusal = vesselInternalInterval(Number.NaN);
+    expect(governingInterval([long, optional, short])).toBe(short);
+    expect(governingInterval([long, late, short])).toBe(late);
+    expect(governingInterval([late, refusal, short])).toBe(refusal);
+    expect(governingInterval([optional])).toBe(optional);
+    expect(governingInterval([])).toBeNull();
+  });
+});
+
+describe('corrosion', () => {
+  it('is judged by the greater of the short- and the long-term rate', () => {
+    const rates = corrosionRates([
+      { years: 1990, thicknessMm: 19.05 },
+      { years: 1997, thicknessMm: 18.8468 },
+      { years: 2003, thicknessMm: 18.2372 },
+    ]);
+    expect(rates).toMatchObject({ governs: 'short term' });
+    expect(rates.status === 'measured' && rates.governingMmPerYear).toBeCloseTo(0.1016, 9);
+    const slowing = corrosionRates([
+      { years: 0, thicknessMm: 20 },
+      { years: 5, thicknessMm: 18 },
+      { years: 10, thicknessMm: 17.9 },
+    ]);
+    expect(slowing).toMatchObject({ governs: 'long term' });
+  });
+
+  it('never runs backwards', () => {
+    const rates = corrosionRates([
+      { years: 0, thicknessMm: 20 },
+      { years: 5, thicknessMm: 20.3 },
+    ]);
+    expect(rates).toMatchObject({ governingMmPerYear: 0, governs: 'none: no loss measured' });
+  });
+
+  it('leaves a life, none, or one without an end', () => {
+    expect(thinningLife(18, 12, 0.4)).toEqual({ status: 'life', years: 15 });
+    expect(thinningLife(12, 12, 0.4).status).toBe('overdue');
+    expect(thinningLife(11, 12, 0).status).toBe('overdue');
+    expect(thinningLife(18, 12, 0)).toEqual({ status: 'no loss' });
+  });
+
+  it.each([
+    ['readings', [{ years: 0, thicknessMm: 20 }]],
+    ['readings', []],
+    ['readings.1.years', [0, 0].map((years) => ({ years, thicknessMm: 20 }))],
+    ['readings.1.years', [5, 0].map((years) => ({ years, thicknessMm: 20 }))],
+    ['readings.0.thicknessMm', [0, 5].map((years) => ({ years, thicknessMm: years }))],
+  ])('is refused by name: %s', (input, readings) => {
+    const rates = corrosionRates(readings);
+    expect(rates.status === 'refused' && rates.refusals[0]?.input).toBe(input);
+  });
+
+  it('refuses a wall or a rate that cannot be', () => {
+    expect(thinningLife(Number.NaN, 12, 0.4).status).toBe('refused');
+    expect(thinningLife(18, 0, 0.4).status).toBe('refused');
+    expect(thinningLife(18, 12, -0.4).status).toBe('refused');
+    expect(thinningLife(18_000, 12, 0.4).status).toBe('refused');
+  });
+});
