@@ -26,6 +26,7 @@ describe('the engine against published values', () => {
       'Stress intensity',
       'Stress intensity against finite elements',
       'Reference stress',
+      'Toughness',
       'Failure assessment diagram',
       'Crack growth',
       'Limiting size',

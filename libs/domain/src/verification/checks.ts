@@ -1,15 +1,18 @@
 import { CURVATURE_CHECKS } from './curvature-checks';
 import { evaluateRow, type CheckResult, type CheckRow } from './check-row';
 import { DIAGRAM_CHECKS } from './diagram-checks';
+import { DIAGRAM_LINE_CHECKS } from './diagram-line-checks';
 import { END_TO_END_CHECKS } from './end-to-end-checks';
 import { GROWTH_LAW_CHECKS } from './growth-law-checks';
 import { GROWTH_LIFE_CHECKS } from './growth-life-checks';
 import { LIMITING_SIZE_CHECKS } from './limiting-size-checks';
+import { MASTER_CURVE_CHECKS } from './master-curve-checks';
 import { PRESSURE_CHECKS } from './pressure-checks';
 import { REFERENCE_STRESS_CHECKS } from './reference-stress-checks';
 import { STRESS_INTENSITY_CHECKS } from './stress-intensity-checks';
 import { STRESS_RAISER_CHECKS } from './stress-raiser-checks';
 import { TIP_FIELD_CHECKS } from './tip-field-checks';
+import { TOUGHNESS_CHECKS } from './toughness-checks';
 import { UNIT_CHECKS } from './unit-checks';
 
 /** Every value the engine is checked against, in the order of the computation. */
@@ -21,7 +24,10 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...STRESS_INTENSITY_CHECKS,
   ...CURVATURE_CHECKS,
   ...REFERENCE_STRESS_CHECKS,
+  ...TOUGHNESS_CHECKS,
+  ...MASTER_CURVE_CHECKS,
   ...DIAGRAM_CHECKS,
+  ...DIAGRAM_LINE_CHECKS,
   ...GROWTH_LAW_CHECKS,
   ...GROWTH_LIFE_CHECKS,
   ...LIMITING_SIZE_CHECKS,
