@@ -20,8 +20,8 @@ export interface PartialFactorsInput {
   readonly size: number;
   /** Toughness is divided by it. */
   readonly toughness: number;
-  /** Yield strength is divided by it. */
-  readonly strength: number;
+  /** Yield and tensile strength are divided by it. */
+  readonly yield: number;
   /** Where the factors come from. */
   readonly note: string;
 }

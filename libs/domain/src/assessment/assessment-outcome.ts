@@ -113,7 +113,9 @@ export interface AssessedFlaw {
   readonly kr: number;
   readonly lr: number;
   readonly lrMax: number;
-  /** Option 1 line as points from Lr = 0 to the cut-off, for drawing. */
+  /** Which line of the diagram the flaw is judged by, e.g. `Option 1`. */
+  readonly diagram?: string;
+  /** That line as points from Lr = 0 to the cut-off, for drawing. */
   readonly line: readonly { readonly lr: number; readonly kr: number }[];
   /** Factor on primary load that brings the point to the line; below 1 when outside. */
   readonly reserveOnLoad: number;

@@ -3,7 +3,7 @@ import type { Refusal } from './assessment-outcome';
 import { isCovered } from '../fracture/select-solutions';
 import { linearised } from '../fracture/stress-intensity/stress-terms';
 import { hasHeight, hasLength, KINDS_OF_WALL } from '../geometry/flaw-kind';
-import { flawCase, primaryTerms } from './flaw-case';
+import { primaryTerms, situationOf } from './flaw-case';
 import { number } from './number-text';
 
 type Rule = (input: AssessmentInput) => Refusal | null;
@@ -15,7 +15,7 @@ export const checkRelations = (input: AssessmentInput): readonly Refusal[] =>
 const kindFitsWall: Rule = (input) => {
   const { wall, flaw } = input;
   const kinds = KINDS_OF_WALL[wall.shape];
-  if (kinds.includes(flaw.kind) && isCovered(flawCase(input).situation)) return null;
+  if (kinds.includes(flaw.kind) && isCovered(situationOf(input))) return null;
   return {
     input: 'flaw.kind',
     limit: `${wall.shape}: ${kinds.join(', ')}`,

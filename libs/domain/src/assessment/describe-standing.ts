@@ -1,4 +1,4 @@
-import { optionOneLine } from '../fracture/fad/option-one-line';
+import { linePoints } from '../fracture/fad/diagram-line';
 import { toMPaSqrtM } from '../units/convert';
 import type { AssessedFlaw } from './assessment-outcome';
 import type { CharacterisedFlaw } from './characterise';
@@ -20,6 +20,7 @@ type StandingPart = Pick<
   | 'lr'
   | 'lrMax'
   | 'line'
+  | 'diagram'
   | 'reserveOnLoad'
   | 'reserveOnToughness'
 >;
@@ -52,7 +53,8 @@ export function describeStanding(
     kr: point.kr,
     lr: point.lr,
     lrMax,
-    line: optionOneLine(section.flaw.material),
+    line: linePoints(section.flaw.line),
+    diagram: section.flaw.line.title,
     reserveOnLoad: point.reserveOnLoad,
     reserveOnToughness: point.reserveOnToughness,
   };

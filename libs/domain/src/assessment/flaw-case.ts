@@ -1,3 +1,4 @@
+import type { DiagramLine } from '../fracture/fad/diagram-line';
 import type { DiagramMaterial } from '../fracture/fad/option-one';
 import type { FlawSituation } from '../fracture/select-solutions';
 import {
@@ -35,6 +36,8 @@ export interface FlawCase {
   readonly facePressure: number;
   readonly residual: ResidualStressInput;
   readonly material: DiagramMaterial;
+  /** Line of the failure assessment diagram. */
+  readonly line: DiagramLine;
   readonly poissonsRatio: number;
   /** Kmat [MPa·√mm]. */
   readonly toughness: number;
@@ -42,28 +45,39 @@ export interface FlawCase {
   readonly attachmentLength: number | null;
 }
 
+/** What the choice of solutions depends on. */
+export const situationOf = ({ wall, flaw }: AssessmentInput): FlawSituation => ({
+  shape: wall.shape,
+  kind: flaw.kind,
+  face: flaw.face,
+  orientation: flaw.orientation,
+  flawedSides: wall.shape === 'hole edge' ? wall.flawedSides : 'one',
+});
+
+/** Strength and stiffness as the diagram takes them, partial factors applied. */
+export function diagramMaterial(input: AssessmentInput): DiagramMaterial {
+  const { material } = input;
+  const factors = factorsOf(input);
+  return {
+    yieldMPa: material.yieldMPa.value / factors.yield,
+    tensileMPa: material.tensileMPa.value / factors.yield,
+    youngsModulusMPa: material.youngsModulusMPa.value,
+    yieldPlateau: material.yieldPlateau,
+  };
+}
+
 /** Strips origins, converts units and applies partial factors; the input has passed its checks. */
-export function flawCase(input: AssessmentInput): FlawCase {
+export function flawCase(input: AssessmentInput, line: DiagramLine): FlawCase {
   const { wall, flaw, stress, material } = input;
   const factors = factorsOf(input);
   return {
-    situation: {
-      shape: wall.shape,
-      kind: flaw.kind,
-      face: flaw.face,
-      orientation: flaw.orientation,
-      flawedSides: wall.shape === 'hole edge' ? wall.flawedSides : 'one',
-    },
+    situation: situationOf(input),
     wall: wallOf(wall, flaw.orientation),
     primary: scaled(primaryTerms(stress, wall.thicknessMm.value), factors.stress),
     facePressure: factors.stress * (stress.crackFacePressureMPa?.value ?? 0),
     residual: stress.residual,
-    material: {
-      yieldMPa: material.yieldMPa.value / factors.strength,
-      tensileMPa: material.tensileMPa.value / factors.strength,
-      youngsModulusMPa: material.youngsModulusMPa.value,
-      yieldPlateau: material.yieldPlateau,
-    },
+    material: diagramMaterial(input),
+    line,
     poissonsRatio: material.poissonsRatio.value,
     toughness: (material.toughnessMPaSqrtM.value * MPA_SQRT_MM_PER['MPa·√m']) / factors.toughness,
     attachmentLength: stress.weldToe?.attachmentLengthMm.value ?? null,

@@ -106,7 +106,7 @@ const OPTIONAL: readonly Row[] = [
   ['partialFactors.stress', 'Factor on stress', '', 1, 5, FACTOR],
   ['partialFactors.size', 'Factor on size', '', 1, 5, FACTOR],
   ['partialFactors.toughness', 'Factor on toughness', '', 1, 5, FACTOR],
-  ['partialFactors.strength', 'Factor on strength', '', 1, 5, FACTOR],
+  ['partialFactors.yield', 'Factor on yield strength', '', 1, 5, FACTOR],
 ];
 
 /** Every number the input holds, or should hold, with its bounds. */

@@ -1,10 +1,11 @@
+import { optionOneLine } from '../fracture/fad/diagram-lines';
 import { characterise } from './characterise';
 import { limitingExtent } from './limiting-extent';
 import { listAssumed } from './list-assumed';
 import { number } from './number-text';
 import { readNumbers } from './read-numbers';
 import { relaxedResidualAt } from './residual-at';
-import { flawCase } from './flaw-case';
+import { diagramMaterial, flawCase } from './flaw-case';
 import { judge, type VerdictSubject } from './verdict';
 import { given, sampleInput } from './testing/sample-input';
 
@@ -153,7 +154,8 @@ describe('limitingExtent', () => {
 });
 
 describe('the residual stress at a factor on the load', () => {
-  const flaw = flawCase(sampleInput({ residual: { state: 'as-welded' } }));
+  const input = sampleInput({ residual: { state: 'as-welded' } });
+  const flaw = flawCase(input, optionOneLine(diagramMaterial(input)));
 
   it('is not relaxed by a load that never came', () => {
     expect(relaxedResidualAt(flaw, 300, 2)).toBe(relaxedResidualAt(flaw, 300, 1));

@@ -4,7 +4,8 @@ import { characterise, type CharacterisedFlaw } from './characterise';
 import { checkInput } from './check-input';
 import { validityRefusals } from './check-validity';
 import { ENGINE_VERSION } from './engine-version';
-import { flawCase } from './flaw-case';
+import { diagramLineOf } from './diagram-line-of';
+import { diagramMaterial, flawCase } from './flaw-case';
 import { sectionOf, type Section } from './section';
 
 /** A case whose inputs are possible and inside the limits of its solutions. */
@@ -18,8 +19,10 @@ export interface PreparedCase {
 export function prepareCase(input: AssessmentInput): PreparedCase | RefusedFlaw {
   const impossible = checkInput(input);
   if (impossible.length > 0) return refused(impossible);
+  const chosen = diagramLineOf(input, diagramMaterial(input));
+  if (chosen.status === 'refused') return refused(chosen.refusals);
   const flaw = characterise(input);
-  const section = sectionOf(flawCase(input), flaw);
+  const section = sectionOf(flawCase(input, chosen.line), flaw);
   const outside = validityRefusals(section.limits, section.crackAt(flaw.a, flaw.c));
   return outside.length > 0 ? refused(outside) : { status: 'prepared', flaw, section };
 }

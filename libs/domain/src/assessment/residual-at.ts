@@ -1,4 +1,4 @@
-import { heatTreatedResidual, relaxedResidual } from '../fracture/fad/residual-stress';
+import { heatTreatedResidual, proofTestedResidual } from '../fracture/fad/residual-stress';
 import { linearTerms, termsOf, type StressTerms } from '../fracture/stress-intensity/stress-terms';
 import type { FlawCase } from './flaw-case';
 
@@ -11,15 +11,6 @@ export function fixedResidual({ residual, material }: FlawCase): StressTerms {
       return termsOf(residual.profileMPa.value);
     case 'heat-treated':
       return linearTerms(heatTreatedResidual(residual.flawToWeld, material.yieldMPa), 0);
-    case 'proof-tested':
-      return linearTerms(
-        relaxedResidual(
-          uncrackedReference(residual.membraneMPa.value, residual.bendingMPa.value),
-          material.yieldMPa,
-          material.tensileMPa,
-        ),
-        0,
-      );
     default:
       return linearTerms(0, 0);
   }
@@ -32,11 +23,24 @@ export function fixedResidual({ residual, material }: FlawCase): StressTerms {
 const uncrackedReference = (membrane: number, bending: number): number =>
   (Math.abs(bending) + Math.hypot(bending, 3 * membrane)) / 3;
 
+/** Whether the load relaxes the residual stress, so that it depends on the flaw. */
+export const isRelaxedByLoad = ({ residual: { state } }: FlawCase): boolean =>
+  state === 'as-welded' || state === 'proof-tested';
+
 /**
- * As-welded residual membrane stress at a factor on the primary load [MPa]. It is relaxed by the load the
- * flaw sees in service: a larger load that never came relaxes nothing more, a smaller one leaves more.
+ * Residual membrane stress of a weld at a factor on the primary load [MPa]. It is relaxed by the load the
+ * flaw sees in service, or by a proof test: a larger load that never came relaxes nothing more, a smaller one
+ * leaves more.
  */
 export function relaxedResidualAt(flaw: FlawCase, reference: number, factor: number): number {
-  const { yieldMPa, tensileMPa } = flaw.material;
-  return relaxedResidual(Math.min(factor, 1) * reference, yieldMPa, tensileMPa);
+  const { residual, material } = flaw;
+  return proofTestedResidual({
+    proofReference:
+      residual.state === 'proof-tested'
+        ? uncrackedReference(residual.membraneMPa.value, residual.bendingMPa.value)
+        : 0,
+    serviceReference: Math.min(factor, 1) * reference,
+    yieldMPa: material.yieldMPa,
+    tensileMPa: material.tensileMPa,
+  });
 }

@@ -1,5 +1,4 @@
 import { interaction } from '../fracture/fad/interaction';
-import { lrMax, optionOne } from '../fracture/fad/option-one';
 import type { ChosenSolutions } from '../fracture/select-solutions';
 import {
   combine,
@@ -19,7 +18,7 @@ import type { Crack } from '../geometry/crack';
 import type { Degrees, MPa } from '../units/quantity';
 import type { FlawCase } from './flaw-case';
 import { flawExtent } from './flaw-extent';
-import { fixedResidual, relaxedResidualAt } from './residual-at';
+import { fixedResidual, isRelaxedByLoad, relaxedResidualAt } from './residual-at';
 
 const ANGLE_STEP = 10;
 const ELLIPSE: readonly Degrees[] = Array.from(
@@ -84,7 +83,7 @@ export class SectionEvaluator {
     readonly solutions: ChosenSolutions,
   ) {
     const { stressIntensity } = solutions;
-    this.lrMax = lrMax(flaw.material);
+    this.lrMax = flaw.line.lrMax;
     this.angles = FRONT_ANGLES[stressIntensity.front];
     this.places = this.angles.map(emptyPlace);
     this.facePressure = flaw.situation.kind === 'embedded' ? 0 : flaw.facePressure;
@@ -148,7 +147,7 @@ export class SectionEvaluator {
   /** Room left to the line: above 0 inside, continuous but for the jump of a yield plateau. */
   margin(factor: number): number {
     const { lr, kr } = this.point(factor);
-    return Math.min(optionOne(lr, this.flaw.material) - kr, this.lrMax - lr);
+    return Math.min(this.flaw.line.height(lr) - kr, this.lrMax - lr);
   }
 
   /** K from a range of stress at the deepest point [MPa·√mm]. */
@@ -162,7 +161,7 @@ export class SectionEvaluator {
   }
 
   private residualAt(factor: number): StressTerms {
-    return this.flaw.residual.state === 'as-welded'
+    return isRelaxedByLoad(this.flaw)
       ? linearTerms(relaxedResidualAt(this.flaw, this.reference, factor), 0)
       : this.residual;
   }

@@ -1,4 +1,3 @@
-import { optionOne } from '../fracture/fad/option-one';
 import { reserveOnLoad } from '../fracture/fad/reserve-on-load';
 import { reserveOnToughness } from '../fracture/fad/reserve-on-toughness';
 import { toMPaSqrtM } from '../units/convert';
@@ -24,7 +23,7 @@ export function standing(section: Section, { a, c }: CharacterisedFlaw): Standin
   evaluator.take(section.crackAt(a, c));
   const point = evaluator.point(1);
   const states = evaluator.angles.map((_, i) => evaluator.frontAt(i, 1));
-  const line = optionOne(point.lr, flaw.material);
+  const line = flaw.line.height(point.lr);
   const collapsed = point.lr >= evaluator.lrMax;
   return {
     ...point,

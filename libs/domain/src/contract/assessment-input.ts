@@ -99,7 +99,7 @@ const options = {
       stress: factor,
       size: factor,
       toughness: factor,
-      strength: factor,
+      yield: factor,
       note: prose(300),
     })
     .nullish(),

@@ -1,6 +1,7 @@
 import { limitingSize } from '../assessment/limiting-size';
 import { sectionOf } from '../assessment/section';
 import type { FlawCase } from '../assessment/flaw-case';
+import { optionOneLine } from '../fracture/fad/diagram-lines';
 import { linearTerms } from '../fracture/stress-intensity/stress-terms';
 import { mm } from '../units/quantity';
 import type { CheckRow } from './check-row';
@@ -17,6 +18,13 @@ const ROWS = [
 
 const given = (value: number) => ({ value, provenance: 'assumed', note: '' }) as const;
 
+const STEEL = {
+  yieldMPa: 350,
+  tensileMPa: 500,
+  youngsModulusMPa: 207_000,
+  yieldPlateau: false,
+};
+
 const plate = (toughness: number, residual: number): FlawCase => ({
   situation: {
     shape: 'plate',
@@ -29,7 +37,8 @@ const plate = (toughness: number, residual: number): FlawCase => ({
   primary: linearTerms(200, 0),
   facePressure: 0,
   residual: { state: 'entered', membraneMPa: given(residual), bendingMPa: given(0) },
-  material: { yieldMPa: 350, tensileMPa: 500, youngsModulusMPa: 207_000, yieldPlateau: false },
+  material: STEEL,
+  line: optionOneLine(STEEL),
   poissonsRatio: 0.3,
   toughness: toughness * Math.sqrt(1000),
   attachmentLength: null,

@@ -5,10 +5,16 @@ import type { SheetSubject } from '../calculation-sheet';
 import { number } from '../number-text';
 import { stepIn } from './step-in';
 
-const OPTION_1 = 'BS 7910:2013 7.3.3, Option 1 (from memory)';
 const DEFINITION = 'BS 7910, R6: definition';
-const CONTINUOUS = '(1 + Lr²/2)^−½ [0.3 + 0.7 exp(−μ Lr⁶)] to Lr = 1, then f(1) Lr^((N−1)/(2N))';
-const PLATEAU = '(1 + Lr²/2)^−½ below Lr = 1 (yield plateau)';
+const FORMULAS: Readonly<Record<string, string>> = {
+  'option-1': '(1 + Lr²/2)^−½ [0.3 + 0.7 exp(−μ Lr⁶)] to Lr = 1, then f(1) Lr^((N−1)/(2N))',
+  'option-1-plateau': '(1 + Lr²/2)^−½ below Lr = 1 (yield plateau)',
+  'option-2': '[E ε/(Lr σY) + Lr³ σY/(2 E ε)]^−½, ε at the true stress Lr σY',
+};
+const CUT_OFFS: Readonly<Record<string, string>> = {
+  'option-1-plateau': '1 (yield plateau)',
+  'option-2': '(σY + σU)/(2 σY), or where the curve ends',
+};
 const INTERACTION =
   '0.1 χ^0.714 − 0.007 χ² + 3·10⁻⁵ χ⁵ to Lr = 0.8, then falling to 0 at 1.05; χ = KIs Lr/KIp';
 
@@ -48,17 +54,18 @@ function pointSteps(subject: SheetSubject): CalculationStep[] {
 
 function lineSteps(subject: SheetSubject): CalculationStep[] {
   const { section, point } = subject;
-  const { yieldMPa, tensileMPa, youngsModulusMPa, yieldPlateau } = section.flaw.material;
+  const { line } = section.flaw;
+  const { yieldMPa, tensileMPa, youngsModulusMPa } = section.flaw.material;
   const strengths = [`σY = ${number(yieldMPa)} MPa`, `σU = ${number(tensileMPa)} MPa`];
   return [
-    step('f(Lr)', 'Line of the diagram', point.line, '', {
-      formula: yieldPlateau ? PLATEAU : CONTINUOUS,
-      source: OPTION_1,
+    step('f(Lr)', `Line of the diagram: ${line.title}`, point.line, '', {
+      formula: FORMULAS[line.key] ?? line.title,
+      source: line.source,
       inputs: [lrText(subject), ...strengths, `E = ${number(youngsModulusMPa)} MPa`],
     }),
     step('Lr,max', 'Cut-off', section.evaluator.lrMax, '', {
-      formula: yieldPlateau ? '1 (yield plateau)' : '(σY + σU)/(2 σY)',
-      source: OPTION_1,
+      formula: CUT_OFFS[line.key] ?? '(σY + σU)/(2 σY)',
+      source: line.source,
       inputs: strengths,
     }),
   ];
