@@ -44,54 +44,46 @@ export function cavityRefusals(input: CavityInput): readonly Refusal[] {
   return single.length > 0 ? single : outOfBounds(relations(input));
 }
 
-function radiusRule({ bottomRadiusMm }: CavityInput): readonly NumberRule[] {
-  if (bottomRadiusMm === null) return [];
-  const named = { input: 'cavity.bottomRadiusMm', name: 'Bottom radius', unit: 'mm' };
-  return [{ ...named, value: bottomRadiusMm, min: 0.1, max: 1e5, instead: LENGTH_HINT }];
-}
+type Bounds = readonly [unit: string, min: number, max: number, instead: string];
+
+const RADIUS: Bounds = ['mm', 0.1, 1e5, LENGTH_HINT];
+const RANGE: Bounds = [
+  'MPa',
+  0,
+  4000,
+  'Give the range from least to greatest stress in MPa, not the amplitude.',
+];
+const CYCLES: Bounds = ['per year', 0, 1e9, 'Count the cycles of one year.'];
+const CLASS: Bounds = ['MPa', 20, 250, 'Take a class of the list.'];
+const SLOPE: Bounds = ['', 2, 5, 'Take a class of the list.'];
+const YEARS: Bounds = ['years', 0, 100, 'Give it in years, at most 100.'];
+
+const rule = (
+  path: string,
+  name: string,
+  value: number,
+  [unit, min, max, instead]: Bounds,
+): NumberRule => ({ input: `cavity.${path}`, name, unit, value, min, max, instead });
+
+const radiusRule = ({ bottomRadiusMm }: CavityInput): readonly NumberRule[] =>
+  bottomRadiusMm === null ? [] : [rule('bottomRadiusMm', 'Bottom radius', bottomRadiusMm, RADIUS)];
 
 function fatigueRules({ fatigue }: CavityInput): readonly NumberRule[] {
   if (fatigue === null) return [];
   const { surface, blocks, years } = fatigue;
-  const at = (path: string, name: string, unit: string, value: number) => ({
-    input: `cavity.fatigue.${path}`,
-    name,
-    unit,
-    value,
-  });
-  const block = ({ membraneRangeMPa, bendingRangeMPa, cyclesPerYear }: CavityBlock, i: number) => [
-    {
-      ...at(`blocks.${i}.membraneRangeMPa`, 'Membrane range', 'MPa', membraneRangeMPa),
-      ...RANGE,
-    },
-    { ...at(`blocks.${i}.bendingRangeMPa`, 'Bending range', 'MPa', bendingRangeMPa), ...RANGE },
-    {
-      ...at(`blocks.${i}.cyclesPerYear`, 'Cycles', 'per year', cyclesPerYear),
-      ...{ min: 0, max: 1e9, instead: 'Count the cycles of one year.' },
-    },
-  ];
   return [
-    {
-      ...at('surface.rangeMPa', 'Range of the class', 'MPa', surface.rangeMPa),
-      ...{ min: 20, max: 250, instead: 'Take a class of the list.' },
-    },
-    {
-      ...at('surface.slope', 'Slope of the class', '', surface.slope),
-      ...{ min: 2, max: 5, instead: 'Take a class of the list.' },
-    },
-    {
-      ...at('years', 'Time', 'years', years),
-      ...{ min: 0, max: 100, above: true, instead: 'Give it in years, at most 100.' },
-    },
-    ...blocks.flatMap(block),
+    rule('fatigue.surface.rangeMPa', 'Range of the class', surface.rangeMPa, CLASS),
+    rule('fatigue.surface.slope', 'Slope of the class', surface.slope, SLOPE),
+    { ...rule('fatigue.years', 'Time', years, YEARS), above: true },
+    ...blocks.flatMap(blockRules),
   ];
 }
 
-const RANGE = {
-  min: 0,
-  max: 4000,
-  instead: 'Give the range from least to greatest stress in MPa, not the amplitude.',
-} as const;
+const blockRules = (block: CavityBlock, i: number): readonly NumberRule[] => [
+  rule(`fatigue.blocks.${i}.membraneRangeMPa`, 'Membrane range', block.membraneRangeMPa, RANGE),
+  rule(`fatigue.blocks.${i}.bendingRangeMPa`, 'Bending range', block.bendingRangeMPa, RANGE),
+  rule(`fatigue.blocks.${i}.cyclesPerYear`, 'Cycles', block.cyclesPerYear, CYCLES),
+];
 
 const relations = (input: CavityInput): readonly NumberRule[] => [
   {
