@@ -24,9 +24,11 @@ export function nearTipField({ opening, sliding, along }: TipLoad): StressField 
   const scale = 1 / Math.sqrt(2 * Math.PI);
   return (x, y, into) => {
     const r = Math.sqrt(x * x + y * y);
-    // the half angle without a call: cos θ/2 ≥ 0 and sin θ/2 has the sign of y
-    const c = Math.sqrt(Math.max((r + x) / (2 * r), 0));
-    const s = Math.sqrt(Math.max((r - x) / (2 * r), 0)) * (y < 0 ? -1 : 1);
+    // the half angle without a call, the smaller part from the larger: cos θ/2 ≥ 0, sin θ/2 as y
+    const larger = Math.sqrt((r + Math.abs(x)) / (2 * r));
+    const smaller = Math.abs(y) / (2 * r * larger);
+    const c = x < 0 ? smaller : larger;
+    const s = (x < 0 ? larger : smaller) * (y < 0 ? -1 : 1);
     const c3 = c * (4 * c * c - 3);
     const s3 = s * (3 - 4 * s * s);
     const k1 = (opening * scale) / Math.sqrt(r);

@@ -140,6 +140,17 @@ describe('the near-tip field', () => {
     }
   });
 
+  it('keeps its digits close to the line ahead and to the faces', () => {
+    const load = { opening: mpaSqrtMm(0), sliding: mpaSqrtMm(1), along: mpa(0) };
+    const slope = -2 / Math.sqrt(2 * Math.PI);
+    const tiny = 1e-9;
+    const state = nearTipField(load)(1, tiny, noStress());
+    // σxx of sliding starts as −KII/√(2πr) (θ/2)(2 + 1)
+    expect(state.xx / ((slope * 3 * tiny) / 4)).toBeCloseTo(1, 9);
+    const face = nearTipField({ ...load, opening: mpaSqrtMm(1) })(-1, tiny, noStress());
+    expect(Math.abs(face.yy)).toBeLessThan(1e-8);
+  });
+
   it('scales with K and with the root of the distance', () => {
     const at = (k: number, r: number) =>
       nearTipStress(
