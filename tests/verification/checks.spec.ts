@@ -30,6 +30,8 @@ describe('the engine against published values', () => {
       'Failure assessment diagram',
       'Crack growth',
       'Limiting size',
+      'Probability',
+      'Intervals',
       'End to end',
     ]);
   });

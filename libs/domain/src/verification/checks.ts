@@ -1,14 +1,17 @@
 import { CURVATURE_CHECKS } from './curvature-checks';
 import { evaluateRow, type CheckResult, type CheckRow } from './check-row';
+import { DETECTION_CHECKS } from './detection-checks';
 import { DIAGRAM_CHECKS } from './diagram-checks';
 import { DIAGRAM_LINE_CHECKS } from './diagram-line-checks';
 import { END_TO_END_CHECKS } from './end-to-end-checks';
 import { GROWTH_LAW_CHECKS } from './growth-law-checks';
 import { GROWTH_LIFE_CHECKS } from './growth-life-checks';
+import { INTERVAL_CHECKS } from './interval-checks';
 import { LIMITING_SIZE_CHECKS } from './limiting-size-checks';
 import { MASTER_CURVE_CHECKS } from './master-curve-checks';
 import { PRESSURE_CHECKS } from './pressure-checks';
 import { REFERENCE_STRESS_CHECKS } from './reference-stress-checks';
+import { RELIABILITY_CHECKS } from './reliability-checks';
 import { STRESS_INTENSITY_CHECKS } from './stress-intensity-checks';
 import { STRESS_RAISER_CHECKS } from './stress-raiser-checks';
 import { TIP_FIELD_CHECKS } from './tip-field-checks';
@@ -31,6 +34,9 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...GROWTH_LAW_CHECKS,
   ...GROWTH_LIFE_CHECKS,
   ...LIMITING_SIZE_CHECKS,
+  ...RELIABILITY_CHECKS,
+  ...DETECTION_CHECKS,
+  ...INTERVAL_CHECKS,
   ...END_TO_END_CHECKS,
 ];
 
