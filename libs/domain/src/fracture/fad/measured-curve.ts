@@ -59,8 +59,9 @@ function curveThrough(nodes: readonly Node[]): StressStrainCurve {
       const share = first && stress > 0 ? stress / first.stress : 0;
       return (first?.ratio ?? 1) ** (share * share);
     }
-    const run = curves.filter(({ from }) => from <= stress).at(-1);
-    return run ? Math.exp(run.curve.at(Math.log(stress))) : 1;
+    let run = curves.length - 1;
+    while (run > 0 && (curves[run]?.from ?? 0) > stress) run--;
+    return Math.exp(curves[run]?.curve.at(Math.log(stress)) ?? 0);
   };
   return {
     title: `measured stress–strain curve of ${nodes.length} points`,

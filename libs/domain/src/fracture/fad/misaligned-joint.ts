@@ -3,7 +3,9 @@ import {
   angularMisalignment,
   axialMisalignment,
   misalignmentBending,
+  ovalityMagnification,
   unequalMisalignment,
+  type OvalCylinder,
 } from './misalignment';
 
 /** A misaligned butt joint as a user enters it. */
@@ -20,15 +22,18 @@ export interface MisalignedJoint {
     readonly halfLengthMm: number;
     readonly ends: 'fixed' | 'pinned';
   } | null;
+  /** A cylinder that is not round, for a seam along it; null for none. */
+  readonly ovality: Omit<OvalCylinder, 'thicknessMm' | 'youngsModulusMPa'> | null;
   readonly youngsModulusMPa: number;
 }
 
 /** What the misalignment adds. */
 export interface MisalignmentAnswer {
   readonly status: 'found';
-  /** Magnification of the offset, and of the angle. */
+  /** Magnification of the offset, of the angle and of the ovality. */
   readonly axial: number;
   readonly angular: number;
+  readonly ovality: number;
   /** Bending stress to add to the primary bending [MPa]. */
   readonly bendingMPa: number;
 }
@@ -48,8 +53,11 @@ export function misalignedJoint(joint: MisalignedJoint): MisalignmentAnswer | Re
   const angular = angle
     ? angularMisalignment({ ...angle, thicknessMm, membraneMPa, youngsModulusMPa })
     : 1;
-  const bendingMPa = misalignmentBending(membraneMPa, [axial, angular]);
-  return { status: 'found', axial, angular, bendingMPa };
+  const ovality = joint.ovality
+    ? ovalityMagnification({ ...joint.ovality, thicknessMm, youngsModulusMPa })
+    : 1;
+  const bendingMPa = misalignmentBending(membraneMPa, [axial, angular, ovality]);
+  return { status: 'found', axial, angular, ovality, bendingMPa };
 }
 
 const length = (input: string, name: string, value: number, min: number, max: number) => ({
@@ -102,5 +110,45 @@ function rulesOf(joint: MisalignedJoint): readonly NumberRule[] {
           length('angle.halfLengthMm', 'Distance to the support', angle.halfLengthMm, 1, 1e5),
         ]
       : []),
+    ...(joint.ovality ? ovalityRules(joint.ovality) : []),
   ];
 }
+
+const ovalityRules = ({
+  differenceMm,
+  diameterMm,
+  angleDeg,
+  pressureMPa,
+  poissonsRatio,
+}: NonNullable<MisalignedJoint['ovality']>): readonly NumberRule[] => [
+  length('ovality.diameterMm', 'Mean diameter', diameterMm, 10, 1e5),
+  // beyond a tenth of the diameter the cylinder is no longer nearly round
+  length('ovality.differenceMm', 'Difference of diameters', differenceMm, 0, diameterMm / 10),
+  {
+    input: 'ovality.angleDeg',
+    name: 'Angle from the greatest diameter',
+    unit: '°',
+    value: angleDeg,
+    min: 0,
+    max: 360,
+    instead: 'Give it in degrees.',
+  },
+  {
+    input: 'ovality.pressureMPa',
+    name: 'Internal pressure',
+    unit: 'MPa',
+    value: pressureMPa,
+    min: 0,
+    max: 200,
+    instead: 'Give it in MPa; a value in bar is ten times too large.',
+  },
+  {
+    input: 'ovality.poissonsRatio',
+    name: 'Poisson’s ratio',
+    unit: '',
+    value: poissonsRatio,
+    min: 0,
+    max: 0.5,
+    instead: 'Steel has about 0.3.',
+  },
+];

@@ -4,6 +4,7 @@ import {
   angularMisalignment,
   axialMisalignment,
   misalignmentBending,
+  ovalityMagnification,
   unequalMisalignment,
 } from './misalignment';
 
@@ -22,6 +23,7 @@ const JOINT: MisalignedJoint = {
   otherThicknessMm: null,
   offsetMm: 2,
   angle: { peakMm: 2, halfLengthMm: 300, ends: 'fixed' },
+  ovality: null,
   youngsModulusMPa: 207_000,
 };
 
@@ -43,6 +45,28 @@ describe('misalignment of a butt joint', () => {
     expect(angularMisalignment({ ...ANGLE, membraneMPa: -50 })).toBeCloseTo(1.3, 12);
   });
 
+  it('by ovality is rounded by pressure, and turns its sign a quarter round the cylinder', () => {
+    const oval = {
+      differenceMm: 10,
+      diameterMm: 1000,
+      thicknessMm: 10,
+      angleDeg: 0,
+      pressureMPa: 0,
+      youngsModulusMPa: 207_000,
+      poissonsRatio: 0.3,
+    };
+    expect(ovalityMagnification({ ...oval, differenceMm: 0 })).toBe(1);
+    expect(ovalityMagnification({ ...oval, angleDeg: 90 })).toBeCloseTo(-0.5, 12);
+    expect(ovalityMagnification({ ...oval, angleDeg: 45 })).toBeCloseTo(1, 12);
+    fc.assert(
+      fc.property(between(0, 10), between(0.1, 5), (pressureMPa, more) => {
+        const less = ovalityMagnification({ ...oval, pressureMPa: pressureMPa + more });
+        expect(less).toBeLessThan(ovalityMagnification({ ...oval, pressureMPa }));
+        expect(less).toBeGreaterThan(1);
+      }),
+    );
+  });
+
   it('adds bending for every kind at the joint', () => {
     expect(misalignmentBending(100, [])).toBe(0);
     expect(misalignmentBending(200, [1.3, 1.1])).toBeCloseTo(80, 12);
@@ -50,12 +74,37 @@ describe('misalignment of a butt joint', () => {
 });
 
 describe('a misaligned joint as entered', () => {
+  const OVAL = {
+    differenceMm: 5,
+    diameterMm: 1000,
+    angleDeg: 0,
+    pressureMPa: 3,
+    poissonsRatio: 0.3,
+  };
+
+  it('takes an oval cylinder into account', () => {
+    const answer = misalignedJoint({ ...JOINT, offsetMm: 0, angle: null, ovality: OVAL });
+    expect(answer).toMatchObject({ status: 'found', axial: 1, angular: 1 });
+    if (answer.status === 'refused') return;
+    expect(answer.ovality).toBeCloseTo(1 + 7.5 / 20 / (1 + (1.5 * 0.91 * 125_000) / 207_000), 12);
+    expect(answer.bendingMPa).toBeCloseTo(150 * (answer.ovality - 1), 12);
+  });
+
+  it('refuses an impossible oval by name', () => {
+    const ovality = { ...OVAL, differenceMm: 2000, poissonsRatio: 0.6 };
+    expect(misalignedJoint({ ...JOINT, ovality })).toMatchObject({
+      status: 'refused',
+      refusals: [{ input: 'ovality.differenceMm' }, { input: 'ovality.poissonsRatio' }],
+    });
+  });
+
   it('answers both magnifications and the bending stress', () => {
     const answer = misalignedJoint(JOINT);
     expect(answer).toEqual({
       status: 'found',
       axial: expect.closeTo(1.3, 12),
       angular: expect.closeTo(1.259075642459307, 12),
+      ovality: 1,
       bendingMPa: expect.closeTo(150 * 0.559075642459307, 9),
     });
   });

@@ -60,6 +60,39 @@ export function angularMisalignment(joint: AngularJoint): number {
 // tanh(x)/x, 1 without stress
 const straightening = (x: number): number => (x > 0 ? Math.tanh(x) / x : 1);
 
+/** A cylinder that is not round, at a seam along it. */
+export interface OvalCylinder {
+  /** Greatest less least diameter [mm]. */
+  readonly differenceMm: number;
+  /** Mean diameter [mm]. */
+  readonly diameterMm: number;
+  readonly thicknessMm: number;
+  /** From the greatest diameter to the seam, φ [°]. */
+  readonly angleDeg: number;
+  /** Internal pressure, which rounds the cylinder [MPa]. */
+  readonly pressureMPa: number;
+  readonly youngsModulusMPa: number;
+  readonly poissonsRatio: number;
+}
+
+/**
+ * Magnification of the hoop stress by ovality: km = 1 + 1.5 (Dmax − Dmin) cos 2φ/{t [1 + 0.5 p (1 − ν²)(D/t)³/E]}.
+ * @param cylinder diameters and thickness [mm], angle φ [°], pressure and modulus [MPa], Poisson's ratio [-]
+ * @returns magnification of the membrane stress at the surface, km; below 1 where it is relieved [-]
+ * @validity small ovality of two lobes, p ≥ 0
+ * @source BS 7910:2013 Annex D, IIW (from memory)
+ * @example ovalityMagnification({ differenceMm: 10, diameterMm: 1000, thicknessMm: 10, angleDeg: 0, pressureMPa: 0, youngsModulusMPa: 207000, poissonsRatio: 0.3 }) // 2.5
+ */
+export function ovalityMagnification(cylinder: OvalCylinder): number {
+  const { differenceMm, diameterMm, thicknessMm, angleDeg, pressureMPa } = cylinder;
+  const { youngsModulusMPa, poissonsRatio } = cylinder;
+  const slender = (diameterMm / thicknessMm) ** 3;
+  const rounding =
+    1 + (0.5 * pressureMPa * (1 - poissonsRatio * poissonsRatio) * slender) / youngsModulusMPa;
+  const around = Math.cos((angleDeg * Math.PI) / 90);
+  return 1 + (1.5 * differenceMm * around) / (thicknessMm * rounding);
+}
+
 /**
  * Bending stress misalignment adds to a membrane stress: (Σ(km − 1)) Pm.
  * @param membrane membrane stress, Pm [MPa]

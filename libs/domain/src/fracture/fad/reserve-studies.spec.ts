@@ -1,8 +1,10 @@
 import fc from 'fast-check';
 import { optionOneLine } from './diagram-lines';
 import { governingPoint, rayFactor } from './governing-point';
+import { reserveOnLoad } from './reserve-on-load';
 import { reserveOnSize } from './reserve-on-size';
 import { sensitivity } from './sensitivity';
+import { toughnessRatio } from './toughness-ratio';
 
 const LINE = optionOneLine({
   yieldMPa: 350,
@@ -11,6 +13,27 @@ const LINE = optionOneLine({
   yieldPlateau: false,
 });
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
+
+describe('the reserve on load with secondary stress', () => {
+  it('puts the point on the line or at the cut-off, the interaction renewed on the way', () => {
+    const cases = fc.record({
+      kp: between(200, 3000),
+      ks: between(0, 2500),
+      lr: between(0.1, 1.2),
+    });
+    fc.assert(
+      fc.property(cases, ({ kp, ks, lr }) => {
+        const at = (f: number) =>
+          toughnessRatio({ kPrimary: f * kp, kSecondary: ks, toughness: 4000, lr: f * lr });
+        const margin = (f: number) => Math.min(LINE.height(f * lr) - at(f), LINE.lrMax - f * lr);
+        const factor = reserveOnLoad(margin, LINE.lrMax / lr);
+        expect(factor).toBeGreaterThan(0);
+        expect(margin(factor)).toBeCloseTo(0, 7);
+        expect(margin(factor * 0.999)).toBeGreaterThan(0);
+      }),
+    );
+  });
+});
 
 describe('the reserve on size', () => {
   it('is the square of that on toughness where K alone decides', () => {

@@ -1,6 +1,13 @@
-import { outOfBounds, refused, type Refusal, type Refused } from '../../geometry/refusal';
+import {
+  outOfBounds,
+  refused,
+  type NumberRule,
+  type Refusal,
+  type Refused,
+} from '../../geometry/refusal';
 import { findMaximum } from '../../numerics/find-maximum';
 import { tearingResistance, type TearingCurve } from './tearing-resistance';
+import { rule } from './toughness-rules';
 
 /** How far a driving J may rise before tearing runs away, and how far the crack has torn by then. */
 export interface TearingInstability {
@@ -52,40 +59,13 @@ const NO_DRIVING_J: Refusal = {
   instead: 'Tearing needs a driving J above 0 over the whole extension.',
 };
 
-const POWER_LAW = 'Fit JR = C Δa^m to the test with J in N/mm and Δa in mm.';
-
 const rulesOf = (
   { coefficient, exponent, validToMm }: TearingCurve,
   drivingJ: (extensionMm: number) => number,
-) => [
-  {
-    input: 'coefficient',
-    name: 'Coefficient C',
-    unit: 'N/mm per mm^m',
-    value: coefficient,
-    min: 1,
-    max: 1e4,
-    instead: POWER_LAW,
-  },
-  {
-    input: 'exponent',
-    name: 'Exponent m',
-    unit: '',
-    value: exponent,
-    min: 0.01,
-    max: 0.99,
-    instead: POWER_LAW,
-  },
-  {
-    input: 'validToMm',
-    name: 'Valid extension',
-    unit: 'mm',
-    value: validToMm,
-    min: 0,
-    max: 100,
-    above: true,
-    instead: 'Give the largest extension the tests are valid to, in millimetres.',
-  },
+): readonly NumberRule[] => [
+  rule('tearingCoefficient', 'coefficient', coefficient),
+  rule('tearingExponent', 'exponent', exponent),
+  { ...rule('extension', 'validToMm', validToMm), above: true },
   ...[0, validToMm].map((extension) => ({
     input: 'drivingJ',
     name: `Driving J after ${extension} mm`,
@@ -94,6 +74,6 @@ const rulesOf = (
     min: 0,
     max: 1e6,
     above: true,
-    instead: 'Tearing needs a driving J above 0 over the whole extension.',
+    instead: NO_DRIVING_J.instead,
   })),
 ];

@@ -89,6 +89,27 @@ const KINDS = {
     max: 1000,
     instead: 'Give it in millimetres.',
   },
+  tearingCoefficient: {
+    name: 'Coefficient C',
+    unit: 'N/mm per mm^m',
+    min: 1,
+    max: 1e4,
+    instead: 'Fit JR = C Δa^m to the test with J in N/mm and Δa in mm.',
+  },
+  tearingExponent: {
+    name: 'Exponent m',
+    unit: '',
+    min: 0.01,
+    max: 0.99,
+    instead: 'Fit JR = C Δa^m to the test with J in N/mm and Δa in mm.',
+  },
+  extension: {
+    name: 'Valid extension',
+    unit: 'mm',
+    min: 0,
+    max: 100,
+    instead: 'Give the largest extension the tests are valid to, in millimetres.',
+  },
   loadRatio: {
     name: 'Pmax/PQ',
     unit: '',
