@@ -162,7 +162,7 @@ export const DIAGRAM_CHECKS: readonly CheckRow[] = [
     'FD-15',
     'reserve on load, primary only, Lr 0.4, Kr 0.4',
     1.976631191521587,
-    1e-8,
+    1e-9,
     'independent computation',
     'root on the radial line',
     () => reserveOnLoad((f) => room(f, 0.4, 0, 1, 0.4), lrMax(STEEL) / 0.4),

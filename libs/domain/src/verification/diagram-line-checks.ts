@@ -16,6 +16,7 @@ import {
 import { optionTwoHeight } from '../fracture/fad/option-two';
 import { rambergOsgoodCurve } from '../fracture/fad/stress-strain-curve';
 import { toughnessRatioByFactor } from '../fracture/fad/toughness-ratio';
+import { holePeakFactor } from '../fracture/stress-raisers/kirsch-field';
 import { linearised, termsOf } from '../fracture/stress-intensity/stress-terms';
 import type { CheckRow } from './check-row';
 import { rowsOf, type Entry } from './entry';
@@ -154,6 +155,15 @@ const JOINT: AngularJoint = {
 };
 
 const STRESSES: readonly Entry[] = [
+  [
+    'peak factor of a circular hole under tension',
+    3,
+    '',
+    0,
+    'closed form',
+    'Kirsch 1898',
+    () => holePeakFactor(0),
+  ],
   ['Pm of 180 falling to 60', 120, 'MPa', 1e-9, 'closed form', 'definition', () => linear.membrane],
   ['Pb of 180 falling to 60', 60, 'MPa', 1e-9, 'closed form', 'definition', () => linear.bending],
   ['Pm of 100 (x/t)²', 100 / 3, 'MPa', 1e-7, 'closed form', 'σ0/3', () => parabola.membrane],

@@ -1,6 +1,15 @@
 import fc from 'fast-check';
-import { continuousLine, lrMax, optionOne, plateauLine, type DiagramMaterial } from './option-one';
-import { optionOneLine } from './option-one-line';
+import {
+  continuousLine,
+  dropStrength,
+  hardening,
+  lrMax,
+  optionOne,
+  plateauLine,
+  plateauRatio,
+  plateauStrain,
+  type DiagramMaterial,
+} from './option-one';
 
 const STEEL: DiagramMaterial = {
   yieldMPa: 350,
@@ -54,19 +63,17 @@ describe('the Option 1 line', () => {
   });
 });
 
-describe('the drawn line', () => {
-  it('runs from the axis to the cut-off and down', () => {
-    const line = optionOneLine(STEEL);
-    expect(line).toHaveLength(62);
-    expect(line[0]).toEqual({ lr: 0, kr: 1 });
-    expect(line[61]).toEqual({ lr: lrMax(STEEL), kr: 0 });
+describe('the constants of Option 1', () => {
+  it('come from the strengths', () => {
+    expect(hardening(STEEL)).toBeCloseTo(0.09, 12);
+    expect(hardening({ ...STEEL, tensileMPa: 350 })).toBe(0);
+    expect(dropStrength(STEEL)).toBeCloseTo(207 / 350, 12);
+    expect(dropStrength({ ...STEEL, yieldMPa: 200 })).toBe(0.6);
   });
 
-  it('has both ends of the jump with a yield plateau', () => {
-    const line = optionOneLine({ ...STEEL, yieldPlateau: true });
-    const [before, at, end] = line.slice(-3);
-    expect(before?.kr).toBeCloseTo(0.8165, 4);
-    expect(at?.kr).toBeCloseTo(0.2543, 3);
-    expect(end).toEqual({ lr: 1, kr: 0 });
+  it('give a plateau that shortens as the steel gets stronger, never below nothing', () => {
+    expect(plateauStrain(300)).toBeGreaterThan(plateauStrain(600));
+    expect(plateauStrain(1200)).toBe(0);
+    expect(plateauRatio({ ...STEEL, yieldMPa: 1200 })).toBe(1);
   });
 });
