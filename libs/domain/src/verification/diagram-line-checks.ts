@@ -16,7 +16,7 @@ import {
 import { optionTwoHeight } from '../fracture/fad/option-two';
 import { rambergOsgoodCurve } from '../fracture/fad/stress-strain-curve';
 import { toughnessRatioByFactor } from '../fracture/fad/toughness-ratio';
-import { holePeakFactor } from '../fracture/stress-raisers/kirsch-field';
+import { holePeakFactor } from '../fracture/stress-raisers/hole-edge';
 import { linearised, termsOf } from '../fracture/stress-intensity/stress-terms';
 import type { CheckRow } from './check-row';
 import { rowsOf, type Entry } from './entry';
