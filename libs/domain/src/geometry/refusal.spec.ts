@@ -33,6 +33,14 @@ describe('bounds of a number', () => {
     ]);
   });
 
+  it('are said without roundings', () => {
+    const [refusal] = outOfBounds([{ ...rule(-(0.1 + 0.2)), max: 1 / 3 }]);
+    expect(refusal?.message).toBe(
+      'Hole radius is -0.3 mm; it must be at least 0 and at most 0.333333 mm.',
+    );
+    expect(refusal?.value).toBe(-(0.1 + 0.2));
+  });
+
   it('say what is not a number', () => {
     const [refusal] = outOfBounds([rule(Number.NaN, true)]);
     expect(refusal?.value).toBe('NaN');

@@ -45,9 +45,11 @@ const broken = ({ value, min, max, above }: NumberRule): boolean =>
   !(Number.isFinite(value) && value <= max && (above ? value > min : value >= min));
 
 function refusalOf({ input, name, unit, value, min, max, above, instead }: NumberRule): Refusal {
-  const low = above ? `above ${min}` : `at least ${min}`;
-  const limit = `${low} and at most ${max} ${unit}`.trim();
-  const got = Number.isFinite(value) ? `is ${value} ${unit}`.trim() : `is ${value}, not a number`;
+  const low = above ? `above ${figure(min)}` : `at least ${figure(min)}`;
+  const limit = `${low} and at most ${figure(max)} ${unit}`.trim();
+  const got = Number.isFinite(value)
+    ? `is ${figure(value)} ${unit}`.trim()
+    : `is ${value}, not a number`;
   return {
     input,
     limit,
@@ -56,3 +58,6 @@ function refusalOf({ input, name, unit, value, min, max, above, instead }: Numbe
     instead,
   };
 }
+
+// a bound worked out from another input carries roundings nobody wants to read
+const figure = (value: number): number => Number(value.toPrecision(6));
