@@ -26,7 +26,7 @@ import { sectionOf } from './section-of';
       <app-drawing
         class="sheet"
         heading="Failure assessment diagram"
-        caption="Option 1"
+        [caption]="assessed().outcome.diagram ?? 'Option 1'"
         [table]="diagramTwin()"
         [name]="name() + '-diagram'"
       >
@@ -84,7 +84,7 @@ export class AssessedDrawings {
   protected readonly lifeTwin = computed(() => lifeTable(this.life()));
   protected readonly plane = computed(() => {
     const { wall, flaw } = this.assessed().input;
-    if (wall.shape === 'plate') return 'crack plane, drawn to scale';
+    if (wall.shape !== 'cylinder') return 'crack plane, drawn to scale';
     return flaw.orientation === 'axial'
       ? 'crack plane along the shell’s axis, drawn to scale'
       : 'crack plane around the shell, unrolled, drawn to scale';

@@ -1,12 +1,14 @@
 import { ChangeDetectionStrategy, Component, input, signal } from '@angular/core';
 import type { AssessmentInput } from '@ligament/domain/assessment/assessment-input';
+import { LeakView } from './leak-view';
+import { LocusView } from './locus-view';
 import { SensitivityView } from './sensitivity-view';
 import { TipView } from './tip-view';
 
 /** Further questions about an assessed flaw, each computed when it is opened. */
 @Component({
   selector: 'app-insights',
-  imports: [SensitivityView, TipView],
+  imports: [LeakView, LocusView, SensitivityView, TipView],
   templateUrl: './insights.html',
   styleUrl: './insights.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
