@@ -42,7 +42,7 @@ const UNDERFLOW = 27;
  * @returns erf(x), −1 to 1 [-]
  * @validity any real x
  * @source Cody, Mathematics of Computation 23 (1969) 631
- * @example erf(1) // 0.842700792949715
+ * @example erf(1) // 0.84270079295
  */
 export function erf(x: number): number {
   const y = Math.abs(x);
@@ -56,7 +56,7 @@ export function erf(x: number): number {
  * @returns erfc(x), 0 to 2 [-]
  * @validity any real x; 0 by underflow beyond 26.5
  * @source Cody, Mathematics of Computation 23 (1969) 631
- * @example erfc(3) * 1e5 // 2.209049699858544
+ * @example erfc(3) * 1e5 // 2.2090496999
  */
 export function erfc(x: number): number {
   const y = Math.abs(x);

@@ -33,7 +33,7 @@ export function betaBelow(x: number, a: number, b: number): number {
  * @returns value, 0 to 1 [-]
  * @validity 0 < p < 1, a and b above 0, at most 1e5
  * @source inverse of the regularised incomplete beta function by a bracketed search
- * @example betaQuantile(0.05, 29, 1) // 0.9018558879
+ * @example betaQuantile(0.05, 29, 1) // 0.90185537232
  */
 export const betaQuantile = (p: number, a: number, b: number): number =>
   findRoot((x) => betaBelow(x, a, b) - p, 0, 1, { tolerance: Number.MIN_VALUE }).x;

@@ -11,7 +11,7 @@ const TINY = 1e-300;
  * @returns Q, 0 to 1 [-]
  * @validity 0 < s ≤ 500, x ≥ 0
  * @source Abramowitz and Stegun 6.5.29 (series) and 6.5.31 (continued fraction, Lentz's evaluation)
- * @example upperGammaShare(1, 2) // 0.1353352832366127
+ * @example upperGammaShare(1, 2) // 0.13533528324
  */
 export function upperGammaShare(s: number, x: number): number {
   if (x <= 0) return 1;

@@ -18,7 +18,7 @@ const SERIES_FROM = 12;
  * @returns ln Γ(x) [-]
  * @validity x > 0
  * @source Abramowitz and Stegun 6.1.41
- * @example logGamma(0.5) // 0.5723649429247001
+ * @example logGamma(0.5) // 0.57236494292
  */
 export function logGamma(x: number): number {
   let [at, product] = [x, 1];
@@ -36,6 +36,6 @@ export function logGamma(x: number): number {
  * @returns Γ(x) [-]
  * @validity 0 < x ≤ 171
  * @source Γ(x) = exp(ln Γ(x))
- * @example gamma(1.25) // 0.9064024770554771
+ * @example gamma(1.25) // 0.90640247706
  */
 export const gamma = (x: number): number => Math.exp(logGamma(x));

@@ -9,7 +9,7 @@ import { normalBelow, normalQuantile } from '../numerics/normal-distribution';
  * @returns probability that the life is over [-]
  * @validity the coefficient multiplies the whole law (all stages); medianLife above 0
  * @source closed form, N ∝ 1/C
- * @example lifeEndedBy(10, 20, 0.3945) // 0.0394585
+ * @example lifeEndedBy(10, 20, 0.3945) // 0.039456597308
  */
 export const lifeEndedBy = (years: number, medianLife: number, sdOfLog: number): number =>
   medianLife === Infinity ? 0 : normalBelow(Math.log(years / medianLife) / sdOfLog);

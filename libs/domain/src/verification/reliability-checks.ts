@@ -1,4 +1,5 @@
-import { covOfLogSd, logSdBetweenCurves, lognormal } from '../probability/distributions/lognormal';
+import { lognormal } from '../probability/distributions/lognormal';
+import { covOfLogSd, logSdBetweenCurves } from '../probability/distributions/lognormal-scatter';
 import { normal } from '../probability/distributions/normal';
 import { weibull } from '../probability/distributions/weibull';
 import { firstOrderReliability } from '../probability/form/first-order-reliability';

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import type { Distribution } from './distribution';
 import { distributionOf } from './distribution-of';
-import { covOfLogSd, logSdBetweenCurves, logSdOfCov } from './lognormal';
+import { covOfLogSd, logSdBetweenCurves, logSdOfCov } from './lognormal-scatter';
 import { VARIABLE_KINDS, type VariableSpec } from './variable-spec';
 
 const SPECS: readonly VariableSpec[] = [

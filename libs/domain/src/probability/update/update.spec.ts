@@ -1,7 +1,8 @@
 import fc from 'fast-check';
 import { exponential } from '../distributions/weibull';
 import { updateDetection } from './update-detection';
-import { presentThoughNotFound, updateMissedSize } from './update-missed';
+import { presentThoughNotFound } from './present-though-not-found';
+import { updateMissedSize } from './update-missed';
 import { updateNormal } from './update-normal';
 
 const between = (min: number, max: number) => fc.double({ min, max, noNaN: true });
