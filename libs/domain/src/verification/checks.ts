@@ -7,6 +7,7 @@ import { END_TO_END_CHECKS } from './end-to-end-checks';
 import { GROWTH_LAW_CHECKS } from './growth-law-checks';
 import { GROWTH_LIFE_CHECKS } from './growth-life-checks';
 import { INTERVAL_CHECKS } from './interval-checks';
+import { LIMITING_LOCUS_CHECKS } from './limiting-locus-checks';
 import { LIMITING_SIZE_CHECKS } from './limiting-size-checks';
 import { MASTER_CURVE_CHECKS } from './master-curve-checks';
 import { PRESSURE_CHECKS } from './pressure-checks';
@@ -34,6 +35,7 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...GROWTH_LAW_CHECKS,
   ...GROWTH_LIFE_CHECKS,
   ...LIMITING_SIZE_CHECKS,
+  ...LIMITING_LOCUS_CHECKS,
   ...RELIABILITY_CHECKS,
   ...DETECTION_CHECKS,
   ...INTERVAL_CHECKS,

@@ -1,11 +1,13 @@
 import { interaction } from '../fracture/fad/interaction';
 import { lrMax, optionOne, type DiagramMaterial } from '../fracture/fad/option-one';
 import { reserveOnLoad } from '../fracture/fad/reserve-on-load';
+import { largestAcceptable } from '../fracture/limiting-flaw/acceptance-search';
 import { cylinderAxialApiReference } from '../fracture/reference-stress/cylinder-axial-api-reference';
 import { PLATE_SURFACE_K } from '../fracture/stress-intensity/plate-surface-k';
 import { ratesPerYear } from '../growth/growth-rates';
 import { integrateGrowth } from '../growth/integrate-growth';
 import { growthLaw } from '../materials/growth-laws';
+import { vesselInternalInterval } from '../scheduling/interval-rules';
 import { mpa } from '../units/quantity';
 import type { CheckRow } from './check-row';
 import { crackOf, kOf } from './crack-of';
@@ -80,6 +82,28 @@ const inMetres = Math.sqrt(1000);
 const reserve = (kmat: number) =>
   reserveOnLoad((f) => margin(SIZE.a, SIZE.c, kmat, f), lrMax(STEEL) / lrOf(SIZE.a, SIZE.c));
 
+const krDeepest = (kmat: number) => {
+  const [kp, ks] = [k(SIZE.a, SIZE.c, 90, 200), k(SIZE.a, SIZE.c, 90, 70)];
+  return (kp + ks) / (kmat * inMetres) + interaction(kp, ks, lrOf(SIZE.a, SIZE.c));
+};
+
+function interval(kmat: number, cyclesPerYear: number): number {
+  const outcome = vesselInternalInterval(life(kmat, cyclesPerYear).years);
+  return outcome.status === 'interval' ? outcome.years : Number.NaN;
+}
+
+function largestFactor(kmat: number): number {
+  const found = largestAcceptable({
+    input: 'stress.primaryMembraneMPa',
+    name: 'load factor',
+    unit: '',
+    least: 0,
+    most: 5,
+    margin: (factor) => margin(SIZE.a, SIZE.c, kmat, factor),
+  });
+  return found.status === 'found' ? found.value : Number.NaN;
+}
+
 export const END_TO_END_CHECKS: readonly CheckRow[] = [
   row('E1-1', 'load ratio', 0.578733896814528, '', 1e-9, () => lrOf(SIZE.a, SIZE.c)),
   row(
@@ -115,6 +139,21 @@ export const END_TO_END_CHECKS: readonly CheckRow[] = [
     1e-5,
     () => life(120, 300).years,
   ),
+  row('E1-7', 'depth there, the share of the wall governs', 20, 'mm', 1e-5, () => life(120, 300).a),
+  row(
+    'E1-8',
+    'cycles to the limit',
+    15656.47209697219,
+    'cycles',
+    1e-5,
+    () => 300 * life(120, 300).years,
+  ),
+  row('E1-9', 'interval: half the life, at most 10 years', 10, 'years', 1e-5, () =>
+    interval(120, 300),
+  ),
+  row('E2-0', 'Kr at the deepest point with interaction', 0.7438992381251965, '', 1e-9, () =>
+    krDeepest(55),
+  ),
   row('E2-1', 'reserve on load, Kmat 55', 1.209088762439486, '', 1e-8, () => reserve(55)),
   row(
     'E2-2',
@@ -131,5 +170,20 @@ export const END_TO_END_CHECKS: readonly CheckRow[] = [
     'years',
     1e-5,
     () => life(55, 1500).years,
+  ),
+  row('E2-4', 'half length there', 19.9438, 'mm', 1e-5, () => life(55, 1500).c),
+  row(
+    'E2-5',
+    'cycles to the limit',
+    8151.987689789869,
+    'cycles',
+    1e-5,
+    () => 1500 * life(55, 1500).years,
+  ),
+  row('E2-6', 'interval: half the life', 2.717329229929956, 'years', 1e-5, () =>
+    interval(55, 1500),
+  ),
+  row('E2-7', 'largest load factor by bracketed search', 1.209088762439486, '', 1e-8, () =>
+    largestFactor(55),
   ),
 ];
