@@ -1,4 +1,10 @@
-import { refused, type Refusal, type Refused } from '../../geometry/refusal';
+import {
+  outOfBounds,
+  refused,
+  type NumberRule,
+  type Refusal,
+  type Refused,
+} from '../../geometry/refusal';
 import {
   FACTORED,
   PARTIAL_FACTORS,
@@ -33,6 +39,8 @@ export function choosePartialFactors(
   if (column < 0) return refused(noColumn(target), ...missing);
   if (missing.length > 0) return refused(...missing);
   const rows = found.flatMap(({ row }) => (row ? [row] : []));
+  const wrong = outOfBounds(rows.flatMap(rulesOf));
+  if (wrong.length > 0) return refused(...wrong);
   const factorOn = (on: Factored) => rows.find((row) => row.on === on)?.factors[column] ?? 1;
   return {
     status: 'found',
@@ -45,6 +53,17 @@ export function choosePartialFactors(
     rows,
   };
 }
+
+const rulesOf = ({ on, variation, factors }: PartialFactorRow): readonly NumberRule[] =>
+  factors.map((value, i) => ({
+    input: `partialFactors.table.${on}.${variation}.${i}`,
+    name: `Factor on ${on}`,
+    unit: '',
+    value,
+    min: 1,
+    max: 10,
+    instead: 'A partial factor is at least 1; 1 changes nothing.',
+  }));
 
 const rowFor = (on: Factored, variation: number, table: readonly PartialFactorRow[]) =>
   variation >= 0

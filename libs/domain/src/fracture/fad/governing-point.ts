@@ -10,7 +10,7 @@ export interface RatedPoint<P extends LinePoint> {
 
 /** Factor on both ratios that brings a point to the line or to the cut-off; null at the origin. */
 export function rayFactor({ lr, kr }: LinePoint, line: DiagramLine): number | null {
-  if (!(lr > 0) && !(kr > 0)) return null;
+  if (lr <= 0 && kr <= 0) return null;
   const margin = (factor: number) =>
     Math.min(line.height(factor * lr) - factor * kr, line.lrMax - factor * lr);
   // the line starts at 1 and never rises above it

@@ -48,6 +48,16 @@ describe('the choice of partial factors', () => {
     expect(choosePartialFactors(7e-5, SCATTER, own)).toMatchObject({ factors: { size: 2 } });
   });
 
+  it('refuses a factor of the site’s own that is less than 1 or none', () => {
+    const own = PARTIAL_FACTORS.map((row) => ({
+      ...row,
+      factors: [1, 0.9, Number.NaN, 1] as const,
+    }));
+    const chosen = choosePartialFactors(7e-5, SCATTER, own);
+    expect(chosen.status).toBe('refused');
+    if (chosen.status === 'refused') expect(chosen.refusals).toHaveLength(8);
+  });
+
   it.each([0.31, -0.1, Number.NaN, Infinity])('refuses a scatter of %d by name', (stress) => {
     const chosen = choosePartialFactors(1e-3, { ...SCATTER, stress });
     expect(chosen).toMatchObject({

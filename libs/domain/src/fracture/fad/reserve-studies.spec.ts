@@ -74,6 +74,7 @@ describe('the factor along a ray', () => {
     expect(rayFactor({ lr: 0, kr: 0.5 }, LINE)).toBeCloseTo(2, 8);
     expect(rayFactor({ lr: 0.5, kr: 0 }, LINE)).toBeCloseTo(LINE.lrMax / 0.5, 8);
     expect(rayFactor({ lr: 0, kr: 0 }, LINE)).toBeNull();
+    expect(rayFactor({ lr: Number.NaN, kr: Number.NaN }, LINE)).toBe(0);
   });
 });
 
