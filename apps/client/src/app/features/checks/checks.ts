@@ -1,14 +1,16 @@
 import { ChangeDetectionStrategy, Component, computed, inject, input } from '@angular/core';
 import { MatButtonModule } from '@angular/material/button';
+import { toSignal } from '@angular/core/rxjs-interop';
 import { ActivatedRoute } from '@angular/router';
 import { ENGINE_VERSION } from '@ligament/domain/assessment/engine-version';
 import { type CheckResult } from '@ligament/domain/verification/check-row';
-import { evaluateChecks } from '@ligament/domain/verification/checks';
+import { CHECK_ROWS } from '@ligament/domain/verification/checks';
 import { Chip } from '../../shared/chips/chip';
 import { saveText } from '../../shared/files/save-text';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { csvText } from '../../shared/table/csv-text';
 import { ListQuery } from '../../shared/table/list-query';
+import { evaluateInTurns, GROUPS, summarise } from './evaluate-in-turns';
 
 /** The engine against published values, computed here and now in this browser. */
 @Component({
@@ -24,14 +26,16 @@ export class Checks {
   private readonly listQuery = inject(ListQuery);
   private readonly route = inject(ActivatedRoute);
   protected readonly engineVersion = ENGINE_VERSION;
-  protected readonly results = evaluateChecks();
-  protected readonly met = this.results.filter(({ met }) => met).length;
-  protected readonly groups = [...new Set(this.results.map(({ group }) => group))];
+  protected readonly total = CHECK_ROWS.length;
+  protected readonly groups = GROUPS;
+  protected readonly results = toSignal(evaluateInTurns(), { initialValue: [] });
+  protected readonly met = computed(() => this.results().filter(({ met }) => met).length);
+  protected readonly summaries = computed(() => summarise(this.results()));
+  protected readonly chosen = computed(() => this.group() ?? GROUPS[0]);
+  protected readonly failed = computed(() => this.show() === 'failed');
+  /** Those of the chosen group; those outside their tolerance whatever their group. */
   protected readonly rows = computed(() =>
-    this.results.filter(
-      (row) =>
-        (!this.group() || row.group === this.group()) && (this.show() !== 'failed' || !row.met),
-    ),
+    this.results().filter((row) => (this.failed() ? !row.met : row.group === this.chosen())),
   );
 
   protected figure(value: number): string {
@@ -44,6 +48,10 @@ export class Checks {
 
   protected tolerance({ tolerance, published }: CheckResult): string {
     return published === 0 ? this.figure(tolerance) : `${(tolerance * 100).toPrecision(2)} %`;
+  }
+
+  protected share(worst: number): string {
+    return `${(worst * 100).toPrecision(2)} %`;
   }
 
   protected set(change: Readonly<Record<string, string | null>>): void {
@@ -63,7 +71,7 @@ export class Checks {
       'kind',
       'source',
     ];
-    const rows = this.rows().map((row) => [
+    const rows = this.results().map((row) => [
       row.group,
       row.quantity,
       row.published,
