@@ -4,11 +4,9 @@ export function polynomialRatio(
   numerator: readonly number[],
   denominator: readonly number[],
 ): number {
-  return horner(x, numerator) / horner(x, denominator);
-}
-
-function horner(x: number, coefficients: readonly number[]): number {
-  let sum = 0;
-  for (const coefficient of coefficients) sum = sum * x + coefficient;
-  return sum;
+  let above = numerator[0] as number;
+  for (let i = 1; i < numerator.length; i++) above = above * x + (numerator[i] as number);
+  let below = denominator[0] as number;
+  for (let i = 1; i < denominator.length; i++) below = below * x + (denominator[i] as number);
+  return above / below;
 }

@@ -67,11 +67,12 @@ describe('first-order reliability', () => {
         between(-200, 200),
         between(1, 40),
         (mr, sr, ms, ss) => {
+          const exact = normalIndex({ mean: mr, sd: sr }, { mean: ms, sd: ss });
+          fc.pre(Math.abs(exact) < 30);
           const answer = form({
             ...LINEAR,
             variables: [variable('r', normal(mr, sr)), variable('s', normal(ms, ss))],
           });
-          const exact = normalIndex({ mean: mr, sd: sr }, { mean: ms, sd: ss });
           expect(Math.abs(answer.beta - exact)).toBeLessThan(1e-6 * (1 + Math.abs(exact)));
         },
       ),
@@ -137,5 +138,28 @@ describe('first-order reliability', () => {
         expect(pf(load + more)).toBeGreaterThan(pf(load));
       }),
     );
+  });
+});
+
+describe('first-order reliability where the margin is awkward', () => {
+  it('bears a margin that is no number far from the mean', () => {
+    // the depth is negative beyond eight standard deviations, and its root no number
+    const answer = form({
+      variables: [variable('a', normal(8, 1)), variable('load', normal(200, 20))],
+      margin: (x) => 60 - 0.1 * at(x, 1) * Math.sqrt(at(x, 0)),
+    });
+    expect(
+      0.1 *
+        (answer.sensitivities[1]?.designValue ?? 0) *
+        Math.sqrt(answer.sensitivities[0]?.designValue ?? 0),
+    ).toBeCloseTo(60, 5);
+  });
+
+  it('bears a margin that is flat about the mean', () => {
+    const answer = form({
+      variables: [variable('x', normal(0, 1))],
+      margin: (x) => 4 - Math.max(at(x, 0), -1) ** 3 / 16,
+    });
+    expect(answer.beta).toBeCloseTo(4, 5);
   });
 });

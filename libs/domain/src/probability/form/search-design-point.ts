@@ -11,8 +11,10 @@ export interface DesignPointSearch {
 }
 
 const MOST_ITERATIONS = 100;
-/** No failure is looked for beyond this distance: its probability is below 1e-32. */
-export const FARTHEST = 12;
+/** Where a probability underflows. */
+const REACH = 37;
+/** Where the slope does not lead, no failure is looked for beyond this distance: its probability is below 1e-32. */
+const FARTHEST = 12;
 const CLOSE = 1e-7;
 const HALVINGS = 12;
 
@@ -43,7 +45,9 @@ function rackwitzFiessler(space: StandardSpace): DesignPointSearch {
       return { status: 'no failure found', point: u, direction, iterations: iteration };
     }
     direction = scaled(slope, -1 / steep);
-    const target = scaled(direction, dot(direction, u) + g / steep);
+    const distance = dot(direction, u) + g / steep;
+    // a flat margin would send the search to where no distribution has values any more
+    const target = scaled(direction, Math.min(Math.max(distance, -REACH), REACH));
     const step = sum(target, u, -1);
     if (length(step) < CLOSE && Math.abs(g) < 1e-9 * scale) {
       return { status: 'converged', point: u, direction, iterations: iteration };

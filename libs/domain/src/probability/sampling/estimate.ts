@@ -53,9 +53,12 @@ export function estimateOf(
 ): SampledProbability {
   const probability = Math.min(Math.max(mean, 0), 1);
   const spread = quantile * standardError;
-  const [low95, high95] = counted
-    ? wilson(probability, frame.samples)
-    : [Math.max(probability - spread, 0), Math.min(probability + spread, 1)];
+  // nothing seen has no scatter to judge by: the bounds of a count hold, and none around a chosen centre
+  const unseen = mean === 0 && !/design point/.test(frame.method);
+  const [low95, high95] =
+    counted || unseen
+      ? wilson(probability, frame.samples)
+      : [Math.max(probability - spread, 0), mean === 0 ? 1 : Math.min(probability + spread, 1)];
   const cov = probability > 0 ? standardError / probability : null;
   return {
     status: 'estimated',

@@ -60,6 +60,14 @@ describe('sampling', () => {
     expect(answer.status === 'estimated' && answer.caution).toMatch(/No failure was seen/);
   });
 
+  it('has an upper bound also where spread points see nothing, and none around a wrong centre', () => {
+    const far = { ...LINEAR, variables: [RESISTANCE, variable('load', normal(-200, 10))] };
+    const spread = failureProbability(far, { samples: 1024, seed: 1, points: 'sobol' });
+    expect(spread.status === 'estimated' && spread.high95).toBeCloseTo(3.84 / 1027.84, 4);
+    const wrong = failureProbability(far, { samples: 1024, seed: 1, centre: [0, 0] });
+    expect(wrong.status === 'estimated' && wrong.high95).toBe(1);
+  });
+
   it('names a sample too small to trust', () => {
     const answer = sampled({ samples: 500, seed: 3 });
     expect(answer.caution).toMatch(/take more samples|No failure/);
