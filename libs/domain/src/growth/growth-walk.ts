@@ -2,6 +2,9 @@ import { dormandPrince, type Stepper } from '../numerics/dormand-prince';
 import { findRoot } from '../numerics/find-root';
 import type { Rates } from './growth-rates';
 
+/** Rates of a flaw of this size after so many years; what does not change with time leaves the years out. */
+export type RatesAt = (a: number, c: number, into: Rates, years: number) => void;
+
 /** State of the growing flaw: years, ln a, ln c. */
 export type GrowthStateVector = Float64Array;
 
@@ -22,15 +25,12 @@ export const sizeIn = (state: GrowthStateVector) => ({
  * deepest point lies under the threshold while its ends grow is then no special case. Where nothing grows
  * the years become infinite.
  */
-export function growthStepper(
-  rates: (a: number, c: number, into: Rates) => void,
-  counted: () => void,
-): Stepper {
+export function growthStepper(rates: RatesAt, counted: () => void): Stepper {
   const rate: Rates = { a: 0, c: 0 };
   return dormandPrince(3, (y, slope) => {
     const a = Math.exp(y[1] as number);
     const c = Math.exp(y[2] as number);
-    rates(a, c, rate);
+    rates(a, c, rate, y[0] as number);
     counted();
     const ra = rate.a / a;
     const rc = rate.c / c;

@@ -1,10 +1,16 @@
-import type { Rates } from './growth-rates';
-import { firstEvent, growthStepper, sizeIn, stepError, type StateEvent } from './growth-walk';
+import {
+  firstEvent,
+  growthStepper,
+  sizeIn,
+  stepError,
+  type RatesAt,
+  type StateEvent,
+} from './growth-walk';
 
 /** Something that ends or interrupts growth: its margin is above 0 before and reaches 0 at the event. */
 export interface GrowthLimit {
   readonly key: string;
-  readonly margin: (a: number, c: number) => number;
+  readonly margin: (a: number, c: number, years: number) => number;
 }
 
 /** Size of the flaw at one time. */
@@ -42,7 +48,7 @@ const MOST_STEPS = 20_000;
  */
 export function integrateGrowth(
   start: { readonly a: number; readonly c: number },
-  rates: (a: number, c: number, into: Rates) => void,
+  rates: RatesAt,
   limits: readonly GrowthLimit[],
   { horizonYears, tolerance = 1e-5, maxStep = 0.1 }: GrowthOptions,
 ): GrowthRun {
@@ -90,8 +96,8 @@ const eventsOf = (limits: readonly GrowthLimit[], horizonYears: number): StateEv
   ...limits.map(({ key, margin }) => ({
     key,
     margin: (state: Float64Array) => {
-      const { a, c } = sizeIn(state);
-      return margin(a, c);
+      const { a, c, years } = sizeIn(state);
+      return margin(a, c, years);
     },
   })),
 ];
