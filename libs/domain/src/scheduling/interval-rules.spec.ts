@@ -12,7 +12,7 @@ import {
 } from './interval-rules';
 import { corrosionRates, thinningLife } from './thinning-life';
 
-const lives = fc.double({ min: -20, max: 80, noNaN: true });
+const lives = fc.integer({ min: -2000, max: 8000 }).map((n) => n / 100);
 const yearsOf = (outcome: IntervalOutcome) =>
   outcome.status === 'interval' ? outcome.years : outcome.status;
 
