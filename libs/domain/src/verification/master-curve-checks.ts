@@ -167,8 +167,44 @@ const T0: readonly Entry[] = [
   ],
 ];
 
+const drawn = (rows: readonly (readonly [temperature: number, ...values: number[]])[]) =>
+  rows.flatMap(([temperature, ...values]) => values.map((k) => test(temperature, k)));
+const SETS: readonly (readonly [t0: number, tests: readonly ToughnessTest[]])[] = [
+  [
+    -75.58557952781469,
+    [
+      ...drawn([
+        [-110, 56.5, 67.6, 61.7, 69.6],
+        [-90, 88.6, 55.2, 43.4, 100],
+        [-70, 90.8, 88.8, 166.1, 105.4],
+        [-50, 140.9, 155.5, 105.7],
+      ]),
+      test(-50, 170, true),
+    ],
+  ],
+  [
+    14.73040050994647,
+    drawn([
+      [-20, 64.3, 85.1, 81],
+      [0, 59, 62.6, 68.5],
+      [20, 149.6, 103.2, 115.3],
+      [40, 124.3, 143.7, 132.7],
+    ]),
+  ],
+];
+const OWN_SETS = SETS.map(([t0, tests]): Entry => [
+  `T0 of ${tests.length} tests drawn at random`,
+  t0,
+  '°C',
+  1e-5,
+  'independent computation',
+  'own search of the greatest likelihood itself, not of its slope',
+  () => t0Of(tests),
+]);
+
 /** The master curve, its distribution and the reference temperature. */
 export const MASTER_CURVE_CHECKS: readonly CheckRow[] = rowsOf('Toughness', 'TM', [
   ...CURVE,
   ...T0,
+  ...OWN_SETS,
 ]);

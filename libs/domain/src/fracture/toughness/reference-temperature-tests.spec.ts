@@ -72,6 +72,50 @@ describe('T0 from tests', () => {
   });
 });
 
+describe('the most likely T0', () => {
+  const drawn = (rows: readonly (readonly [temperature: number, ...values: number[]])[]) =>
+    rows.flatMap(([temperature, ...values]) => values.map((k) => test(temperature, k)));
+  const SETS = [
+    {
+      tests: [
+        ...drawn([
+          [-110, 56.5, 67.6, 61.7, 69.6],
+          [-90, 88.6, 55.2, 43.4, 100],
+          [-70, 90.8, 88.8, 166.1, 105.4],
+          [-50, 140.9, 155.5, 105.7],
+        ]),
+        test(-50, 170, true),
+      ],
+      t0: -75.58557952781469,
+    },
+    {
+      tests: [
+        ...drawn([
+          [-60, 67.1, 76.1, 63.6, 70.7, 68.3, 43.8],
+          [-30, 101.5, 92.6, 77.8, 51.5, 108.9, 86.8],
+          [0, 124.1],
+        ]),
+        ...[1, 2, 3, 4, 5].map(() => test(0, 150, true)),
+      ],
+      t0: -25.70608338765432,
+    },
+    {
+      tests: drawn([
+        [-20, 64.3, 85.1, 81],
+        [0, 59, 62.6, 68.5],
+        [20, 149.6, 103.2, 115.3],
+        [40, 124.3, 143.7, 132.7],
+      ]),
+      t0: 14.73040050994647,
+    },
+  ];
+
+  // T0 found by a search of the likelihood itself, not of its slope
+  it.each(SETS)('is $t0 °C', ({ tests, t0 }) => {
+    expect(found(tests).t0C).toBeCloseTo(t0, 4);
+  });
+});
+
 describe('a test brought to a front of 25.4 mm', () => {
   it('keeps its value there and loses from a shorter one', () => {
     expect(toOneInch(test(-80, 100)).kMPaSqrtM).toBeCloseTo(100, 9);
