@@ -4,6 +4,8 @@ import { DETECTION_CHECKS } from './detection-checks';
 import { DIAGRAM_CHECKS } from './diagram-checks';
 import { DIAGRAM_LINE_CHECKS } from './diagram-line-checks';
 import { END_TO_END_CHECKS } from './end-to-end-checks';
+import { FLAT_K_CHECKS } from './flat-k-checks';
+import { FLAT_K_ELEMENT_CHECKS } from './flat-k-element-checks';
 import { GROWTH_LAW_CHECKS } from './growth-law-checks';
 import { GROWTH_LIFE_CHECKS } from './growth-life-checks';
 import { INTERVAL_CHECKS } from './interval-checks';
@@ -18,6 +20,7 @@ import { STRESS_RAISER_CHECKS } from './stress-raiser-checks';
 import { TIP_FIELD_CHECKS } from './tip-field-checks';
 import { TOUGHNESS_CHECKS } from './toughness-checks';
 import { UNIT_CHECKS } from './unit-checks';
+import { WELD_TOE_CHECKS } from './weld-toe-checks';
 
 /** Every value the engine is checked against, in the order of the computation. */
 export const CHECK_ROWS: readonly CheckRow[] = [
@@ -26,7 +29,10 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...STRESS_RAISER_CHECKS,
   ...TIP_FIELD_CHECKS,
   ...STRESS_INTENSITY_CHECKS,
+  ...FLAT_K_CHECKS,
+  ...WELD_TOE_CHECKS,
   ...CURVATURE_CHECKS,
+  ...FLAT_K_ELEMENT_CHECKS,
   ...REFERENCE_STRESS_CHECKS,
   ...TOUGHNESS_CHECKS,
   ...MASTER_CURVE_CHECKS,

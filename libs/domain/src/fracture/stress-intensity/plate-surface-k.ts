@@ -2,6 +2,7 @@ import type { Crack } from '../../geometry/crack';
 import { DEPTH_RATIO, type Limit } from '../../geometry/limit';
 import type { Degrees } from '../../units/quantity';
 import { ASPECT_LIMIT, WIDTH_LIMIT } from './common-limits';
+import { bendingShare, riseTowardsFace, surfacePolynomial } from './newman-raju-1984';
 import { angularFactor, shapeFactor } from './shape-factor';
 import type { Influence, StressIntensitySolution } from './solution';
 
@@ -37,37 +38,21 @@ export const PLATE_SURFACE_LIMITS: readonly Limit[] = [
   WIDTH_LIMIT,
 ];
 
-/** Tension polynomial, angular amplification and bending multiplier of the equation at one point. */
-function tensionFactor(crack: Crack, sine: number): number {
-  const { a, c, thickness, width } = crack;
+/** F of the equation at one point: polynomial, angular amplification, width. */
+function tensionFactor({ a, c, thickness, width }: Crack, sine: number): number {
   const depth = a / thickness;
-  const depth2 = depth * depth;
-  const long = a <= c;
-  const r = long ? a / c : c / a;
-  const m1 = long ? 1.13 - 0.09 * r : Math.sqrt(r) * (1 + 0.04 * r);
-  const m2 = long ? -0.54 + 0.89 / (0.2 + r) : 0.2 * r ** 4;
-  const m3 = long ? 0.5 - 1 / (0.65 + r) + 14 * (1 - r) ** 24 : -0.11 * r ** 4;
-  const towards = 1 - sine;
-  const g = 1 + (0.1 + 0.35 * (long ? 1 : r) * depth2) * towards * towards;
   const fw =
     1 / Math.sqrt(Math.cos(Math.PI * Math.min((c / width) * Math.sqrt(depth), 0.5 - 1e-9)));
-  return (m1 + (m2 + m3 * depth2) * depth2) * g * fw * angularFactor(a, c, sine);
+  return (
+    surfacePolynomial(a, c, depth) *
+    riseTowardsFace(a, c, depth, sine) *
+    fw *
+    angularFactor(a, c, sine)
+  );
 }
 
-/** Share of the outer-fibre bending stress that acts at the point, H. */
-function bendingMultiplier({ a, c, thickness }: Crack, sine: number): number {
-  const depth = a / thickness;
-  const long = a <= c;
-  const r = long ? a / c : c / a;
-  const r75 = r ** 0.75;
-  const h1 = long
-    ? 1 - 0.34 * depth - 0.11 * r * depth
-    : 1 + ((0.55 - 1.93 * r75 + 1.38 * r75 * r75) * depth - 0.04 - 0.41 * r) * depth;
-  const h2 = long
-    ? 1 + ((0.55 - 1.05 * r75 + 0.47 * r75 * r75) * depth - 1.22 - 0.12 * r) * depth
-    : 1 + ((0.55 - 0.72 * r75 + 0.14 * r75 * r75) * depth - 2.11 + 0.77 * r) * depth;
-  return h1 + (h2 - h1) * sine ** (0.2 + r + 0.6 * depth);
-}
+/** First coefficient of the square term of H2 for a surface crack. */
+const DEEPEST_BENDING = 0.55;
 
 /**
  * K of a semi-elliptical surface crack in a plate: K = (σm + H σb) √(πa/Q) F, here per unit of stress.
@@ -83,7 +68,8 @@ export function plateSurfaceInfluence(crack: Crack, angle: Degrees, into: Influe
   const sine = Math.sin((angle * Math.PI) / 180);
   const root = Math.sqrt((Math.PI * crack.a) / shapeFactor(crack.a, crack.c));
   into.membrane = root * tensionFactor(crack, sine);
-  into.bending = into.membrane * bendingMultiplier(crack, sine);
+  const { a, c, thickness } = crack;
+  into.bending = into.membrane * bendingShare(a, c, a / thickness, sine, DEEPEST_BENDING);
   into.reversedBending = -into.bending;
 }
 
