@@ -104,6 +104,21 @@ function largestFactor(kmat: number): number {
   return found.status === 'found' ? found.value : Number.NaN;
 }
 
+// a pipe wall 15 mm thick, 4 mm deep, growing 0.5 mm a year into the wall and 1.5 at each end
+function yearsToDeepest(): number {
+  const perYear = ratesPerYear(
+    { fatigue: null, stressCorrosion: { depthRateMmPerYear: 0.5, endRateMmPerYear: 1.5 } },
+    { deepest: () => 0, end: () => 0 },
+  );
+  const run = integrateGrowth(
+    { a: 4, c: (150 * Math.PI * 40) / 180 },
+    (_a, _c, into) => perYear(into),
+    [{ key: 'depth', margin: (a) => 0.8 - a / 15 }],
+    { horizonYears: 100, tolerance: 1e-9 },
+  );
+  return run.states[run.states.length - 1]?.years ?? Number.NaN;
+}
+
 export const END_TO_END_CHECKS: readonly CheckRow[] = [
   row('E1-1', 'load ratio', 0.578733896814528, '', 1e-9, () => lrOf(SIZE.a, SIZE.c)),
   row(
@@ -186,4 +201,5 @@ export const END_TO_END_CHECKS: readonly CheckRow[] = [
   row('E2-7', 'largest load factor by bracketed search', 1.209088762439486, '', 1e-8, () =>
     largestFactor(55),
   ),
+  row('E4-1', 'pipe under stress corrosion: time to a/t = 0.8', 16, 'years', 1e-9, yearsToDeepest),
 ];
