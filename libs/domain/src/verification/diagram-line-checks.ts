@@ -17,7 +17,9 @@ import { optionTwoHeight } from '../fracture/fad/option-two';
 import { rambergOsgoodCurve } from '../fracture/fad/stress-strain-curve';
 import { toughnessRatioByFactor } from '../fracture/fad/toughness-ratio';
 import { holePeakFactor } from '../fracture/stress-raisers/hole-edge';
+import { notchShortCrackFactor } from '../fracture/stress-intensity/hole-crack';
 import { linearised, termsOf } from '../fracture/stress-intensity/stress-terms';
+import { mm } from '../units/quantity';
 import type { CheckRow } from './check-row';
 import { rowsOf, type Entry } from './entry';
 
@@ -163,6 +165,15 @@ const STRESSES: readonly Entry[] = [
     'closed form',
     'Kirsch 1898',
     () => holePeakFactor(0),
+  ],
+  [
+    'F of a crack at the edge of a circular hole, its length going to 0',
+    3.3645,
+    '',
+    1e-9,
+    'closed form',
+    '1.1215 times the peak factor',
+    () => notchShortCrackFactor(mm(0), mm(10), mm(10)),
   ],
   ['Pm of 180 falling to 60', 120, 'MPa', 1e-9, 'closed form', 'definition', () => linear.membrane],
   ['Pb of 180 falling to 60', 60, 'MPa', 1e-9, 'closed form', 'definition', () => linear.bending],
