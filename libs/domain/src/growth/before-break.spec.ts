@@ -47,6 +47,20 @@ describe('the time from detectable to critical', () => {
     });
   });
 
+  it('counts rates and limits that change with time from the same day', () => {
+    const answer = window({
+      rates: (a, c, into, years) => {
+        into.a = 0.02 * (1 + years) * a;
+        into.c = 0.01 * (1 + years) * c;
+      },
+      start: { a: 1, c: 10 },
+      critical: [{ key: 'year 20', margin: (_a, _c, years) => 20 - years }],
+    });
+    if (answer.status !== 'window') throw new Error(answer.status);
+    expect(answer.yearsToDetectable).toBeCloseTo(Math.sqrt(1 + 100 * Math.log(3)) - 1, 4);
+    expect(answer.yearsToDetectable + answer.yearsToCritical).toBeCloseTo(20, 4);
+  });
+
   it('is open when the horizon comes first', () => {
     expect(window({}, 5)).toEqual({ status: 'not detectable within the horizon' });
     expect(window({}, 15)).toMatchObject({ status: 'not critical within the horizon' });

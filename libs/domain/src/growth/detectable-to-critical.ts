@@ -1,4 +1,4 @@
-import type { Rates } from './growth-rates';
+import type { RatesAt } from './growth-walk';
 import {
   integrateGrowth,
   type GrowthLimit,
@@ -32,7 +32,7 @@ export type DetectableWindow =
 
 export interface WindowQuestion {
   readonly start: { readonly a: number; readonly c: number };
-  readonly rates: (a: number, c: number, into: Rates) => void;
+  readonly rates: RatesAt;
   /** Room to the size that can be found, above 0 while it cannot, e.g. a90 − a. */
   readonly untilDetectable: (a: number, c: number) => number;
   readonly critical: readonly GrowthLimit[];
@@ -45,7 +45,7 @@ export function detectableToCritical(
   { start, rates, untilDetectable, critical }: WindowQuestion,
   options: GrowthOptions,
 ): DetectableWindow {
-  const spent = critical.find(({ margin }) => !(margin(start.a, start.c) > 0));
+  const spent = critical.find(({ margin }) => !(margin(start.a, start.c, 0) > 0));
   if (spent) return { status: 'critical before detectable', years: 0, limit: spent.key };
   const already = !(untilDetectable(start.a, start.c) > 0);
   let found: SizeAt = { ...start, years: 0 };
@@ -64,8 +64,15 @@ export function detectableToCritical(
     }
     found = end;
   }
-  const rest = { ...options, horizonYears: options.horizonYears - found.years };
-  const second = integrateGrowth(found, rates, critical, rest);
+  const second = integrateGrowth(
+    found,
+    (a, c, into, years) => rates(a, c, into, found.years + years),
+    critical.map(({ key, margin }) => ({
+      key,
+      margin: (a, c, years) => margin(a, c, found.years + years),
+    })),
+    { ...options, horizonYears: options.horizonYears - found.years },
+  );
   const last = second.states[second.states.length - 1];
   if (second.stop === 'step limit' || !last) return NOT_FOLLOWED;
   if (second.limit === null) {

@@ -10,7 +10,6 @@ import {
   vesselExternalInterval,
   vesselInternalInterval,
 } from './interval-rules';
-import { corrosionRates, thinningLife } from './thinning-life';
 
 const lives = fc.integer({ min: -2000, max: 8000 }).map((n) => n / 100);
 const yearsOf = (outcome: IntervalOutcome) =>
@@ -135,56 +134,5 @@ describe('several rules together', () => {
     expect(governingInterval([late, refusal, short])).toBe(refusal);
     expect(governingInterval([optional])).toBe(optional);
     expect(governingInterval([])).toBeNull();
-  });
-});
-
-describe('corrosion', () => {
-  it('is judged by the greater of the short- and the long-term rate', () => {
-    const rates = corrosionRates([
-      { years: 1990, thicknessMm: 19.05 },
-      { years: 1997, thicknessMm: 18.8468 },
-      { years: 2003, thicknessMm: 18.2372 },
-    ]);
-    expect(rates).toMatchObject({ governs: 'short term' });
-    expect(rates.status === 'measured' && rates.governingMmPerYear).toBeCloseTo(0.1016, 9);
-    const slowing = corrosionRates([
-      { years: 0, thicknessMm: 20 },
-      { years: 5, thicknessMm: 18 },
-      { years: 10, thicknessMm: 17.9 },
-    ]);
-    expect(slowing).toMatchObject({ governs: 'long term' });
-  });
-
-  it('never runs backwards', () => {
-    const rates = corrosionRates([
-      { years: 0, thicknessMm: 20 },
-      { years: 5, thicknessMm: 20.3 },
-    ]);
-    expect(rates).toMatchObject({ governingMmPerYear: 0, governs: 'none: no loss measured' });
-  });
-
-  it('leaves a life, none, or one without an end', () => {
-    expect(thinningLife(18, 12, 0.4)).toEqual({ status: 'life', years: 15 });
-    expect(thinningLife(12, 12, 0.4).status).toBe('overdue');
-    expect(thinningLife(11, 12, 0).status).toBe('overdue');
-    expect(thinningLife(18, 12, 0)).toEqual({ status: 'no loss' });
-  });
-
-  it.each([
-    ['readings', [{ years: 0, thicknessMm: 20 }]],
-    ['readings', []],
-    ['readings.1.years', [0, 0].map((years) => ({ years, thicknessMm: 20 }))],
-    ['readings.1.years', [5, 0].map((years) => ({ years, thicknessMm: 20 }))],
-    ['readings.0.thicknessMm', [0, 5].map((years) => ({ years, thicknessMm: years }))],
-  ])('is refused by name: %s', (input, readings) => {
-    const rates = corrosionRates(readings);
-    expect(rates.status === 'refused' && rates.refusals[0]?.input).toBe(input);
-  });
-
-  it('refuses a wall or a rate that cannot be', () => {
-    expect(thinningLife(Number.NaN, 12, 0.4).status).toBe('refused');
-    expect(thinningLife(18, 0, 0.4).status).toBe('refused');
-    expect(thinningLife(18, 12, -0.4).status).toBe('refused');
-    expect(thinningLife(18_000, 12, 0.4).status).toBe('refused');
   });
 });
