@@ -1,3 +1,4 @@
+import { CORROSION_EXAMPLE_CHECKS } from './corrosion-example-checks';
 import { CURVATURE_CHECKS } from './curvature-checks';
 import { evaluateRow, type CheckResult, type CheckRow } from './check-row';
 import { DETECTION_CHECKS } from './detection-checks';
@@ -6,8 +7,13 @@ import { DIAGRAM_LINE_CHECKS } from './diagram-line-checks';
 import { END_TO_END_CHECKS } from './end-to-end-checks';
 import { FLAT_K_CHECKS } from './flat-k-checks';
 import { FLAT_K_ELEMENT_CHECKS } from './flat-k-element-checks';
+import { GROWTH_EXAMPLE_CHECKS } from './growth-example-checks';
+import { GROWTH_FORM_CHECKS } from './growth-form-checks';
 import { GROWTH_LAW_CHECKS } from './growth-law-checks';
 import { GROWTH_LIFE_CHECKS } from './growth-life-checks';
+import { GROWTH_SPECTRUM_CHECKS } from './growth-spectrum-checks';
+import { GROWTH_SURFACE_CHECKS } from './growth-surface-checks';
+import { GROWTH_TIME_CHECKS } from './growth-time-checks';
 import { INTERVAL_CHECKS } from './interval-checks';
 import { LIMITING_LOCUS_CHECKS } from './limiting-locus-checks';
 import { LIMITING_SIZE_CHECKS } from './limiting-size-checks';
@@ -39,7 +45,13 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...DIAGRAM_CHECKS,
   ...DIAGRAM_LINE_CHECKS,
   ...GROWTH_LAW_CHECKS,
+  ...GROWTH_FORM_CHECKS,
   ...GROWTH_LIFE_CHECKS,
+  ...GROWTH_SPECTRUM_CHECKS,
+  ...GROWTH_SURFACE_CHECKS,
+  ...GROWTH_TIME_CHECKS,
+  ...GROWTH_EXAMPLE_CHECKS,
+  ...CORROSION_EXAMPLE_CHECKS,
   ...LIMITING_SIZE_CHECKS,
   ...LIMITING_LOCUS_CHECKS,
   ...RELIABILITY_CHECKS,

@@ -1,16 +1,7 @@
 import { outOfBounds, refused, type NumberRule, type Refused } from '../../geometry/refusal';
 import { findRoot } from '../../numerics/find-root';
-import { netDepthRate, stressRise, yearsToShare, type Thinning } from './thinning';
-
-/** A crack at a constant rate in a wall that thins under a load that stays. */
-export interface ThinningCrack {
-  readonly depthMm: number;
-  readonly wallMm: number;
-  readonly growthMmPerYear: number;
-  readonly thinning: Thinning;
-  readonly stressMPa: number;
-  readonly shapeFactor: number;
-}
+import { yearsToShare } from './thinning';
+import { stressIntensityAfter, type ThinningCrack } from './thinning-crack';
 
 export type TimeToToughness =
   | { readonly status: 'reached'; readonly years: number }
@@ -27,7 +18,7 @@ export function yearsToToughness(
   const broken = outOfBounds(rulesOf(crack, toughnessMPaSqrtMm));
   if (broken.length > 0) return refused(...broken);
   const { depthMm, wallMm, growthMmPerYear, thinning } = crack;
-  const missing = (years: number) => kAfter(crack, years) - toughnessMPaSqrtMm;
+  const missing = (years: number) => stressIntensityAfter(crack, years) - toughnessMPaSqrtMm;
   if (missing(0) >= 0) return { status: 'reached already' };
   const through = yearsToShare(depthMm, wallMm, 1, growthMmPerYear, thinning);
   if (!Number.isFinite(through)) return { status: 'never' };
@@ -36,14 +27,6 @@ export function yearsToToughness(
   return root.status === 'found'
     ? { status: 'reached', years: root.x }
     : { status: 'through the wall first', years: through };
-}
-
-/** K after a time at constant shape factor. */
-function kAfter({ shapeFactor, stressMPa, ...crack }: ThinningCrack, years: number): number {
-  const { depthMm, wallMm, growthMmPerYear, thinning } = crack;
-  const depth = Math.max(depthMm + netDepthRate(growthMmPerYear, thinning) * years, 0);
-  const stress = stressMPa * stressRise(wallMm, thinning.rateMmPerYear, years);
-  return shapeFactor * stress * Math.sqrt(Math.PI * depth);
 }
 
 function rulesOf(crack: ThinningCrack, toughness: number): readonly NumberRule[] {
