@@ -19,7 +19,7 @@ export const halfPlaneEdgeFactor = (): number => 1.1215222552;
  * Edge crack in a strip free to bend, uniform tension: F in K = F σ √(πa).
  * @param alpha crack length over width, α = a/W [-]
  * @returns factor F [-]
- * @validity any α < 1, 0.6 % against finite elements
+ * @validity any α < 1; stated 0.5 %, found within 0.7 %
  * @source Tada, Paris and Irwin, The Stress Analysis of Cracks Handbook
  * @example edgeTensionTada(0.1) // 1.1957
  */

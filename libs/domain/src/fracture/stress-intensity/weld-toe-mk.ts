@@ -3,12 +3,12 @@ import type { Mm } from '../../units/quantity';
 /**
  * Magnification of membrane stress at the toe of a weld, two-dimensional:
  * L/B ≤ 2: 0.51(L/B)^0.27 (z/B)^−0.31 to z/B = 0.05(L/B)^0.55, then 0.83(z/B)^(−0.15(L/B)^0.46);
- * L/B > 2: as at 2. Never below 1.
+ * L/B > 2: 0.615(z/B)^−0.31 to z/B = 0.073, then 0.83(z/B)^−0.20. Never below 1.
  * @param z depth of the point of the front, z [mm]
  * @param attachment length of the attachment along the stress, weld toes included, L [mm]
  * @param thickness plate thickness, B [mm]
  * @returns Mk [-]
- * @validity sharp toe at 45°, z > 0; the branches meet within 2 % for L/B ≥ 0.5
+ * @validity sharp toe at 45°, z > 0; the printed branches meet within 3 %, the rule itself jumps there
  * @source Maddox and Andrews 1990 in the form of BS 7910; coefficients as in the JCSS Probabilistic Model Code, fatigue annex
  * @example weldToeMembrane(mm(0.005), mm(1), mm(1)) // 2.63566054124
  */
@@ -30,7 +30,7 @@ export function weldToeMembrane(z: Mm, attachment: Mm, thickness: Mm): number {
  * @param attachment length of the attachment along the stress, weld toes included, L [mm]
  * @param thickness plate thickness, B [mm]
  * @returns Mk [-]
- * @validity sharp toe at 45°, z > 0; the branches meet within 2 % for L/B ≥ 0.5
+ * @validity sharp toe at 45°, z > 0; the printed branches meet within 2.5 %, the rule itself jumps there
  * @source Maddox and Andrews 1990 in the form of BS 7910; coefficients as in the JCSS Probabilistic Model Code, fatigue annex
  * @example weldToeBending(mm(0.01), mm(0.5), mm(1)) // 1.62179596171
  */
