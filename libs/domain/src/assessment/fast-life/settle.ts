@@ -5,7 +5,6 @@ import {
   deep,
   endN,
   endQ,
-  ends,
   evaluations,
   LAST,
   mostLnA,
