@@ -110,8 +110,10 @@ export interface ParisStage {
   readonly exponent: number;
 }
 
-/** A fatigue growth law from the site's library, with its source. */
+/** A fatigue growth law from the site's library, or a published one of another form, with its source. */
 export interface FatigueLawInput {
+  /** A published law that depends on more than ΔK; it is found by its key and its stages are empty. */
+  readonly published?: boolean;
   readonly key: string;
   readonly title: string;
   readonly source: string;
@@ -127,6 +129,28 @@ export interface CycleBlockInput {
   readonly bendingRangeMPa: number;
   readonly cyclesPerYear: number;
   readonly note: string;
+  /** Least over greatest stress intensity of the cycle, residual stress included; left out: as at a weld. */
+  readonly stressRatio?: number | null;
+}
+
+/** A law of growth with time that depends on K: a published one, or the plant's own power law. */
+export type TimeLawInput =
+  | { readonly kind: 'published'; readonly key: string }
+  | {
+      /** da/dt = coefficient · K^exponent, mm/year with K in MPa·√m, at most the plateau. */
+      readonly kind: 'own';
+      readonly coefficient: Given;
+      readonly exponent: Given;
+      /** Below this K nothing grows [MPa·√m]; 0 for none. */
+      readonly thresholdMPaSqrtM: Given;
+      readonly plateauMmPerYear: Given | null;
+    };
+
+/** A wall that corrodes evenly while the flaw grows. */
+export interface ThinningInput {
+  readonly rateMmPerYear: Given;
+  /** Face that corrodes, seen from the flaw. */
+  readonly face: 'cracked' | 'opposite';
 }
 
 /** What makes the flaw grow; both parts may be null (no growth expected). */
@@ -134,12 +158,17 @@ export interface GrowthInput {
   readonly fatigue: {
     readonly law: FatigueLawInput;
     readonly blocks: readonly CycleBlockInput[];
+    /** Metal temperature of the cycles, for laws that depend on it [°C]. */
+    readonly temperatureC?: Given | null;
   } | null;
   /** Constant (plateau) rates of stress corrosion: into the wall, and at each end along the surface [mm/year]. */
   readonly stressCorrosion: {
     readonly depthRateMmPerYear: Given;
     readonly endRateMmPerYear: Given;
   } | null;
+  /** Growth with time by K, beside or instead of constant rates. */
+  readonly withTime?: { readonly law: TimeLawInput; readonly temperatureC: Given } | null;
+  readonly thinning?: ThinningInput | null;
 }
 
 /** Everything one assessment needs, in N and mm but for the fields that name another unit. */

@@ -1,5 +1,6 @@
 import { CHI_SIMPLE_LIMIT, chi } from '../fracture/fad/interaction';
 import type { AssessmentInput } from './assessment-input';
+import { growthCautions } from './check-growth';
 import type { CharacterisedFlaw } from './characterise';
 import { number } from './number-text';
 import type { Section } from './section';
@@ -26,10 +27,10 @@ export function cautions(subject: CautionSubject): readonly string[] {
     flaw.recategorised
       ? `The embedded flaw is so near the face that it is assessed as a surface flaw ${number(flaw.a)} mm deep.`
       : null,
-    input.growth.stressCorrosion
+    input.growth.stressCorrosion || input.growth.withTime
       ? 'Stress corrosion can be far faster than any rate given here if the chemistry changes; branched cracks are easily undersized.'
       : null,
-    input.growth.stressCorrosion && section.kind === 'embedded'
+    (input.growth.stressCorrosion || input.growth.withTime) && section.kind === 'embedded'
       ? 'Stress corrosion is given for an embedded flaw, which the medium does not reach before it breaks the surface.'
       : null,
     section.flaw.facePressure > 0 && input.growth.fatigue
@@ -37,6 +38,10 @@ export function cautions(subject: CautionSubject): readonly string[] {
       : null,
     chi(point.at.kPrimary, point.at.kSecondary, point.lr) > CHI_SIMPLE_LIMIT
       ? 'Secondary stress is large against primary (χ above 4): the interaction term goes beyond the simple form.'
+      : null,
+    ...growthCautions(input),
+    input.growth.thinning
+      ? 'The wall corrodes while the flaw grows: its least thickness for pressure is not judged here.'
       : null,
     near.length > 0 ? `Close to a limit of the solution: ${near.join(', ')}.` : null,
     assumed.length > 0

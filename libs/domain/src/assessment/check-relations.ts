@@ -3,14 +3,17 @@ import type { Refusal } from './assessment-outcome';
 import { isCovered } from '../fracture/select-solutions';
 import { linearised } from '../fracture/stress-intensity/stress-terms';
 import { hasHeight, hasLength, KINDS_OF_WALL } from '../geometry/flaw-kind';
+import { checkGrowth } from './check-growth';
 import { primaryTerms, situationOf } from './flaw-case';
 import { number } from './number-text';
 
 type Rule = (input: AssessmentInput) => Refusal | null;
 
 /** What inputs say to each other: each is in its own range, together they are impossible. */
-export const checkRelations = (input: AssessmentInput): readonly Refusal[] =>
-  RULES.map((rule) => rule(input)).filter((refusal) => refusal !== null);
+export const checkRelations = (input: AssessmentInput): readonly Refusal[] => [
+  ...RULES.map((rule) => rule(input)).filter((refusal) => refusal !== null),
+  ...checkGrowth(input),
+];
 
 const kindFitsWall: Rule = (input) => {
   const { wall, flaw } = input;
@@ -107,31 +110,6 @@ const somePrimaryStress: Rule = ({ stress, wall }) => {
   };
 };
 
-const lawHasStages: Rule = ({ growth }) => {
-  const stages = growth.fatigue?.law.stages;
-  if (!stages || stages.length > 0) return null;
-  return {
-    input: 'growth.fatigue.law.stages',
-    limit: 'at least one stage',
-    value: 0,
-    message: 'The growth law has no stage.',
-    instead: 'Choose a law of the site’s library.',
-  };
-};
-
-const stagesMeet: Rule = ({ growth }) => {
-  const stages = growth.fatigue?.law.stages ?? [];
-  const at = stages.findIndex((stage, i) => i > 0 && stage.exponent === stages[i - 1]?.exponent);
-  if (at < 0) return null;
-  return {
-    input: `growth.fatigue.law.stages.${at}.exponent`,
-    limit: 'stages of different exponent',
-    value: stages[at]?.exponent ?? null,
-    message: 'Two stages of the growth law have the same exponent: they never meet.',
-    instead: 'Give them as one stage.',
-  };
-};
-
 const RULES: readonly Rule[] = [
   kindFitsWall,
   heightLeavesWall,
@@ -140,6 +118,4 @@ const RULES: readonly Rule[] = [
   lengthInsideWidth,
   tensileAboveYield,
   somePrimaryStress,
-  lawHasStages,
-  stagesMeet,
 ];

@@ -8,7 +8,8 @@ import {
 } from '../growth/recategorise';
 import { DEPTH_RATIO } from '../geometry/limit';
 import type { FlawKind } from '../geometry/flaw-kind';
-import { ratesPerYear, type Drivers, type Rates } from '../growth/growth-rates';
+import type { GrowthDrivers } from './drivers';
+import { growthRates, lawMargin } from './growth-rates-of';
 import type { GrowthEnd, GrowthEvent, GrowthState } from './assessment-outcome';
 import type { CharacterisedFlaw } from './characterise';
 import type { FlawCase } from './flaw-case';
@@ -32,7 +33,7 @@ const DRAWN_STATES = 40;
 export function followGrowth(
   flaw: FlawCase,
   start: CharacterisedFlaw,
-  drivers: Drivers,
+  drivers: GrowthDrivers,
   horizonYears: number,
 ): GrowthHistory {
   const stretches: Stretch[] = [];
@@ -40,17 +41,17 @@ export function followGrowth(
   let current = start;
   let elapsed = 0;
   for (;;) {
-    const section = sectionOf(flaw, current);
-    const run = runSection(section, current, drivers, horizonYears - elapsed);
+    const section = sectionOf(flaw, current, drivers.thinning);
+    const run = runSection(section, current, drivers, { elapsed, horizonYears });
     stretches.push({ section, run, from: elapsed });
     const last = run.states[run.states.length - 1] ?? { years: 0, a: current.a, c: current.c };
     elapsed += last.years;
     if (run.limit !== 'proximity') {
-      const end = endOf(run, section, last);
+      const end = endOf(run, section, last, elapsed);
       if (end.end === 'through-wall') events.push(breakthrough(section, last, elapsed));
       return { path: growthStates(stretches, drivers), events, years: elapsed, ...end };
     }
-    const nearest = section.ligament(last.a);
+    const nearest = section.ligament(last.a, elapsed);
     const depth = surfaceDepth(last.a, nearest);
     events.push({
       years: elapsed,
@@ -76,14 +77,15 @@ export function followGrowth(
 function runSection(
   section: Section,
   start: CharacterisedFlaw,
-  drivers: Drivers,
-  horizonYears: number,
+  drivers: GrowthDrivers,
+  { elapsed, horizonYears: end }: { readonly elapsed: number; readonly horizonYears: number },
 ): GrowthRun {
-  const rates = rateFunction(section, drivers);
-  const limits = limitsOf(section);
+  const rates = growthRates(section, drivers, elapsed);
+  const limits = limitsOf(section, drivers, elapsed);
+  const horizonYears = end - elapsed;
   const size = { a: start.a, c: start.c };
   // a jump in category may land on a limit at once
-  const spent = limits.find(({ margin }) => !(margin(size.a, size.c) > 0));
+  const spent = limits.find(({ margin }) => !(margin(size.a, size.c, 0) > 0));
   if (spent) {
     const states = [{ years: 0, ...size }];
     return { stop: 'limit', limit: spent.key, states, distance: 0, evaluations: 0 };
@@ -100,31 +102,20 @@ function runSection(
   });
 }
 
-function limitsOf(section: Section): GrowthLimit[] {
+function limitsOf(section: Section, drivers: GrowthDrivers, elapsed: number): GrowthLimit[] {
   const limits: GrowthLimit[] = [
-    { key: 'diagram', margin: section.margin },
-    { key: 'validity', margin: (a, c) => section.validity(a, c).room },
+    { key: 'diagram', margin: (a, c, years) => section.margin(a, c, elapsed + years) },
+    { key: 'validity', margin: (a, c, years) => section.validity(a, c, elapsed + years).room },
   ];
   if (section.kind === 'embedded') {
-    limits.unshift({ key: 'proximity', margin: (a) => proximityMargin(a, section.ligament(a)) });
+    limits.unshift({
+      key: 'proximity',
+      margin: (a, _c, years) => proximityMargin(a, section.ligament(a, elapsed + years)),
+    });
   }
+  const law = lawMargin(section, drivers, elapsed);
+  if (law) limits.push({ key: 'growth law', margin: law });
   return limits;
-}
-
-function rateFunction(section: Section, drivers: Drivers) {
-  const { evaluator, crackAt } = section;
-  const perYear = ratesPerYear(drivers, {
-    deepest: (membrane, bending) => evaluator.deepest(membrane, bending),
-    end: (membrane, bending) => evaluator.end(membrane, bending),
-  });
-  const { front } = evaluator.solutions.stressIntensity;
-  return (a: number, c: number, into: Rates) => {
-    evaluator.takeEnds(crackAt(a, c));
-    perYear(into);
-    // a straight front has no ends of its own, a through-wall crack no deepest point
-    if (front === 'straight') into.c = 0;
-    if (front === 'through') into.a = 0;
-  };
 }
 
 /** The flaw that reaches the far face: from there on it is a leak. */
@@ -152,6 +143,7 @@ function endOf(
   run: GrowthRun,
   section: Section,
   last: { readonly a: number; readonly c: number },
+  years: number,
 ): { readonly end: GrowthEnd; readonly validityLimit: string | null } {
   switch (run.stop) {
     case 'horizon':
@@ -162,7 +154,10 @@ function endOf(
       return { end: 'outside validity', validityLimit: 'steps of the integration' };
     case 'limit': {
       if (run.limit === 'diagram') return { end: 'limit reached', validityLimit: null };
-      const { limit } = section.validity(last.a, last.c);
+      if (run.limit === 'growth law') {
+        return { end: 'outside validity', validityLimit: 'range of the growth law' };
+      }
+      const { limit } = section.validity(last.a, last.c, years);
       const through = limit?.name === DEPTH_RATIO && BREAKS_THROUGH.has(section.kind);
       return {
         end: through ? 'through-wall' : 'outside validity',

@@ -1,5 +1,5 @@
 import type { GrowthRun, SizeAt } from '../growth/integrate-growth';
-import type { Drivers } from '../growth/growth-rates';
+import type { GrowthDrivers } from './drivers';
 import { toMPaSqrtM } from '../units/convert';
 import type { GrowthState } from './assessment-outcome';
 import type { Section } from './section';
@@ -15,7 +15,7 @@ export interface Stretch {
 const MOST_STATES = 60;
 
 /** The states of all stretches, thinned evenly to what a drawing can use; first and last always stay. */
-export function growthStates(stretches: readonly Stretch[], drivers: Drivers): GrowthState[] {
+export function growthStates(stretches: readonly Stretch[], drivers: GrowthDrivers): GrowthState[] {
   const perYear = cyclesPerYear(drivers);
   const total = stretches.reduce((sum, { run }) => sum + run.states.length, 0);
   const every = Math.max(Math.ceil(total / MOST_STATES), 1);
@@ -27,7 +27,7 @@ export function growthStates(stretches: readonly Stretch[], drivers: Drivers): G
 }
 
 /** Cycles of every block in a year. */
-export const cyclesPerYear = ({ fatigue }: Drivers): number =>
+export const cyclesPerYear = ({ fatigue }: Pick<GrowthDrivers, 'fatigue'>): number =>
   (fatigue?.blocks ?? []).reduce((sum, block) => sum + block.cyclesPerYear, 0);
 
 /** One state of the growing flaw: its size evaluated at service load. */
@@ -38,16 +38,17 @@ export function stateOf(
   perYear: number,
 ): GrowthState {
   const { evaluator, kind } = section;
-  evaluator.take(section.crackAt(size.a, size.c));
-  const { lr, kr, governing } = evaluator.point(1);
-  const { kPrimary, kSecondary } = evaluator.frontAt(governing, 1);
   const years = from + size.years;
+  const rise = section.rise(years);
+  evaluator.take(section.crackAt(size.a, size.c, years));
+  const { lr, kr, governing } = evaluator.point(rise);
+  const { kPrimary, kSecondary } = evaluator.frontAt(governing, rise);
   return {
     years,
     cycles: years * perYear,
     kind,
     ...section.shown(size.a, size.c),
-    ligamentMm: section.ligament(size.a),
+    ligamentMm: section.ligament(size.a, years),
     kMaxMPaSqrtM: toMPaSqrtM(kPrimary + kSecondary),
     kr,
     lr,

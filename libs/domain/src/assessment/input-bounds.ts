@@ -28,6 +28,8 @@ const RANGE = 'Give the range from least to greatest stress in MPa, not the ampl
 const LAW = 'Give the law for mm/cycle and MPa·√mm.';
 const RATE = 'Give it in mm/year.';
 const LIGAMENT = 'An embedded flaw needs the ligament to the face, in millimetres.';
+const CELSIUS = 'Give it in degrees Celsius.';
+const OWN_LAW = 'Give the law for mm/year with K in MPa·√m.';
 const FACTOR = 'A partial factor is at least 1; 1 changes nothing.';
 const TENSION = `Membrane compression is not a case for this method. ${STRESS}`;
 
@@ -98,6 +100,13 @@ const OPTIONAL: readonly Row[] = [
   ['material.stressStrainCurve.value.*.strain', 'Strain', '', 0, 1, 'Give it as mm/mm, not in %.'],
   ['material.stressStrainCurve.value.*.stressMPa', 'Stress of the curve', 'MPa', 0, 5000, STRESS],
   ['growth.fatigue.blocks.*.stressRatio', 'Stress ratio', '', -20, 0.99, 'Least over greatest.'],
+  ['growth.fatigue.temperatureC', 'Temperature of the cycles', '°C', -273, 1000, CELSIUS],
+  ['growth.withTime.temperatureC', 'Metal temperature', '°C', -273, 1000, CELSIUS],
+  ['growth.withTime.law.coefficient', 'Coefficient', '', 0, 1e6, OWN_LAW, 'above'],
+  ['growth.withTime.law.exponent', 'Exponent', '', 0, 20, OWN_LAW],
+  ['growth.withTime.law.thresholdMPaSqrtM', 'Threshold', 'MPa·√m', 0, 200, OWN_LAW],
+  ['growth.withTime.law.plateauMmPerYear', 'Plateau', 'mm/year', 0, 1000, RATE, 'above'],
+  ['growth.thinning.rateMmPerYear', 'Corrosion rate', 'mm/year', 0, 100, RATE],
   ['neighbours.*.heightMm', 'Height of the neighbour', 'mm', 0, 1000, LENGTH, 'above'],
   ['neighbours.*.lengthMm', 'Length of the neighbour', 'mm', 0, 1e5, LENGTH, 'above'],
   ['neighbours.*.ligamentMm', 'Ligament of the neighbour', 'mm', 0, 1000, LENGTH],

@@ -106,10 +106,19 @@ export class SectionEvaluator {
     this.reference = this.solutions.referenceStress.stress(crack, force as MPa, bending as MPa);
   }
 
-  /** Takes up only the deepest point and the end, all that growth needs. */
+  /** Takes up only the deepest point and the end, all that growth by cycles needs. */
   takeEnds(crack: Crack): void {
     this.fill(crack, 0);
     this.fill(crack, this.places.length - 1);
+  }
+
+  /** K of primary and secondary stress together, which stays on: at the deepest point and at the end [MPa·√mm]. */
+  sustained(factor: number): { readonly deepest: number; readonly end: number } {
+    const [deepest, end] = [this.frontAt(this.places.length - 1, factor), this.frontAt(0, factor)];
+    return {
+      deepest: deepest.kPrimary + deepest.kSecondary,
+      end: end.kPrimary + end.kSecondary,
+    };
   }
 
   /** Point of the diagram at a factor on the primary load. */

@@ -1,11 +1,18 @@
 import { selectSolutions, type FlawSituation } from '../fracture/select-solutions';
-import { fromOtherFace, profileOf, termsOf } from '../fracture/stress-intensity/stress-terms';
+import {
+  fromOtherFace,
+  isCurved,
+  profileOf,
+  termsOf,
+} from '../fracture/stress-intensity/stress-terms';
 import type { Crack } from '../geometry/crack';
 import { lengthIsOneSided, type FlawKind } from '../geometry/flaw-kind';
 import { roomToUpperBounds, type Limit, type Room } from '../geometry/limit';
 import type { ResidualStressInput } from './assessment-input';
 import { OTHER_FACE, type CharacterisedFlaw } from './characterise';
 import { crackIn, type FlawCase } from './flaw-case';
+import type { Thinning } from '../growth/with-time/thinning';
+import { thinningWall } from './thinning-wall';
 import { SectionEvaluator } from './section-evaluator';
 
 /** A flaw in its category, ready to be evaluated at any size. */
@@ -15,13 +22,15 @@ export interface Section {
   readonly face: 'inside' | 'outside';
   readonly evaluator: SectionEvaluator;
   readonly limits: readonly Limit[];
-  /** The crack of this size; an embedded one keeps its centre where it is. */
-  readonly crackAt: (a: number, c: number) => Crack;
+  /** The crack of this size after so many years; an embedded one keeps its centre where it is. */
+  readonly crackAt: (a: number, c: number, years?: number) => Crack;
+  /** Factor on every stress of the load as the wall thins; 1 when it does not. */
+  readonly rise: (years?: number) => number;
   /** Room to the line of the diagram at service load. */
-  readonly margin: (a: number, c: number) => number;
-  readonly validity: (a: number, c: number) => Room;
+  readonly margin: (a: number, c: number, years?: number) => number;
+  readonly validity: (a: number, c: number, years?: number) => Room;
   /** Ligament to the nearer face of an embedded flaw; the wall ahead of a surface flaw [mm]. */
-  readonly ligament: (a: number) => number;
+  readonly ligament: (a: number, years?: number) => number;
   /** Face an embedded flaw of this half height is nearest to. */
   readonly nearestFace: (a: number) => 'inside' | 'outside';
   /** Height and length of the flaw as they are measured [mm]. */
@@ -35,6 +44,7 @@ export interface Section {
 export function sectionOf(
   flaw: FlawCase,
   { kind, face, a: startA, ligament: startLigament }: CharacterisedFlaw,
+  thinning: Thinning | null = null,
 ): Section {
   const turned = face === flaw.situation.face ? flaw : turnedOver(flaw);
   const placed: FlawCase = {
@@ -46,9 +56,14 @@ export function sectionOf(
   const { stressIntensity, referenceStress } = evaluator.solutions;
   const limits = [...stressIntensity.limits, ...referenceStress.limits];
   const { thickness } = placed.wall;
-  const centre = startLigament + startA;
-  const toFace = (a: number) => (kind === 'embedded' ? centre - a : 0);
-  const crackAt = (a: number, c: number) => crackIn(placed, a, c, Math.max(toFace(a), 0));
+  const wall = thinningWall(thickness, thinning, isBent(placed));
+  // from the face that is measured to: it moves when that face corrodes
+  const centre = (years: number) => startLigament + startA - wall.lostAtFace(years);
+  const toFace = (a: number, years: number) => (kind === 'embedded' ? centre(years) - a : 0);
+  const crackAt = (a: number, c: number, years = 0): Crack => ({
+    ...crackIn(placed, a, c, Math.max(toFace(a, years), 0)),
+    thickness: wall.thickness(years),
+  });
   return {
     flaw: placed,
     kind,
@@ -56,16 +71,19 @@ export function sectionOf(
     evaluator,
     limits,
     crackAt,
-    margin: (a, c) => {
-      evaluator.take(crackAt(a, c));
-      return evaluator.margin(1);
+    rise: (years = 0) => wall.rise(years),
+    margin: (a, c, years = 0) => {
+      evaluator.take(crackAt(a, c, years));
+      return evaluator.margin(wall.rise(years));
     },
-    validity: (a, c) => roomToUpperBounds(limits, crackAt(a, c)),
-    ligament: (a) => ligamentAhead(kind, a, centre, thickness),
-    nearestFace: (a) => (toFace(a) <= thickness - a - centre ? face : OTHER_FACE[face]),
+    validity: (a, c, years = 0) => roomToUpperBounds(limits, crackAt(a, c, years)),
+    ligament: (a, years = 0) => ligamentAhead(kind, a, centre(years), wall.thickness(years)),
+    nearestFace: (a) => (toFace(a, 0) <= thickness - a - centre(0) ? face : OTHER_FACE[face]),
     shown: (a, c) => shownSize(placed.situation, a, c, thickness),
   };
 }
+
+const isBent = ({ primary }: FlawCase): boolean => primary.bending !== 0 || isCurved(primary);
 
 /** Wall left ahead of the flaw: to the nearer face when it is embedded, none when it goes through. */
 function ligamentAhead(kind: FlawKind, a: number, centre: number, thickness: number): number {

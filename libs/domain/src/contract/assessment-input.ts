@@ -58,12 +58,12 @@ const residual = z.discriminatedUnion('state', [
 ]);
 
 const law = z.strictObject({
+  published: z.boolean().optional(),
   key: line(60),
   title: line(160),
   source: prose(300),
   stages: z
     .array(z.strictObject({ coefficient: above0(1, ''), exponent: between(0.1, 20, '') }))
-    .min(1)
     .max(2),
   thresholdMPaSqrtMm: between(0, 1e5, 'MPa√mm'),
 });
@@ -73,7 +73,20 @@ const block = z.strictObject({
   bendingRangeMPa: between(-5000, 5000, 'MPa'),
   cyclesPerYear: between(0, 1e10, 'cycles per year'),
   note: prose(300),
+  stressRatio: between(-1e6, 1, '').nullish(),
 });
+
+const timeLaw = z.discriminatedUnion('kind', [
+  z.strictObject({ kind: z.literal('published'), key: line(60) }),
+  z.strictObject({
+    kind: z.literal('own'),
+    coefficient: given(above0(1e9, '')),
+    exponent: given(between(0, 50, '')),
+    thresholdMPaSqrtM: given(between(0, 1e4, 'MPa√m')),
+    plateauMmPerYear: given(above0(1e6, 'mm/year')).nullable(),
+  }),
+]);
+const celsius = given(between(-273, 2000, '°C'));
 
 const rate = given(between(0, 1000, 'mm/year'));
 
@@ -138,10 +151,16 @@ export const assessmentInput = z.strictObject({
     ).nullish(),
   }),
   growth: z.strictObject({
-    fatigue: z.strictObject({ law, blocks: z.array(block).max(200) }).nullable(),
+    fatigue: z
+      .strictObject({ law, blocks: z.array(block).max(200), temperatureC: celsius.nullish() })
+      .nullable(),
     stressCorrosion: z
       .strictObject({ depthRateMmPerYear: rate, endRateMmPerYear: rate })
       .nullable(),
+    withTime: z.strictObject({ law: timeLaw, temperatureC: celsius }).nullish(),
+    thinning: z
+      .strictObject({ rateMmPerYear: rate, face: z.enum(['cracked', 'opposite']) })
+      .nullish(),
   }),
   horizonYears: between(1, 100, 'years'),
   ...options,
