@@ -23,6 +23,7 @@ import { REFERENCE_STRESS_CHECKS } from './reference-stress-checks';
 import { RELIABILITY_CHECKS } from './reliability-checks';
 import { STRESS_INTENSITY_CHECKS } from './stress-intensity-checks';
 import { STRESS_RAISER_CHECKS } from './stress-raiser-checks';
+import { THROUGH_WALL_LIFE_CHECKS } from './through-wall-life-checks';
 import { TIP_FIELD_CHECKS } from './tip-field-checks';
 import { TOUGHNESS_CHECKS } from './toughness-checks';
 import { UNIT_CHECKS } from './unit-checks';
@@ -58,6 +59,7 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...DETECTION_CHECKS,
   ...INTERVAL_CHECKS,
   ...END_TO_END_CHECKS,
+  ...THROUGH_WALL_LIFE_CHECKS,
 ];
 
 /** Computes every row here and now. */
