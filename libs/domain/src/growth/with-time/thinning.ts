@@ -66,5 +66,7 @@ export function yearsToShare(
   const room = share * wall - depth;
   if (room <= 0) return 0;
   const closing = netDepthRate(growth, thinning) + share * thinning.rateMmPerYear;
-  return closing > 0 ? room / closing : Infinity;
+  const years = room / closing;
+  // a crack that corrosion takes away meets the share only where the wall is gone: never
+  return closing > 0 && wallAfter(wall, thinning.rateMmPerYear, years) > 0 ? years : Infinity;
 }

@@ -137,6 +137,8 @@ describe('a wall that thins', () => {
     expect(yearsToShare(17, 20, 0.8, 0.4, OPPOSITE)).toBe(0);
     expect(yearsToShare(4, 20, 0.8, 0, { ...OPPOSITE, rateMmPerYear: 0 })).toBe(Infinity);
     expect(yearsToShare(4, 20, 0.8, 0.01, CRACKED)).toBe(Infinity);
+    // crack and wall go to nothing together
+    expect(yearsToShare(1, 20, 0.9, 0.2, { ...CRACKED, rateMmPerYear: 0.5 })).toBe(Infinity);
   });
 });
 
