@@ -42,6 +42,21 @@ describe('a law against the blocks of a histogram', () => {
     }
   });
 
+  it('is refused without the temperature it needs, or at one it is not for', () => {
+    const austenitic = law('austenitic-air-code');
+    expect(matchBlocks(austenitic, [block(0.5)])).toMatchObject({
+      refusals: [{ input: 'temperatureC' }],
+    });
+    expect(matchBlocks(austenitic, [block(0.5)], { temperatureC: 300 })).toMatchObject({
+      status: 'matched',
+    });
+    expect(
+      matchBlocks(law('steel-air-simplified'), [block()], { temperatureC: 300 }),
+    ).toMatchObject({
+      refusals: [{ input: 'temperatureC', value: 300 }],
+    });
+  });
+
   it('warns of a law for low ratios where none is given', () => {
     expect(matchBlocks(law('steel-air-low-mean'), [block()])).toMatchObject({
       cautions: [expect.stringMatching(/at a weld/)],

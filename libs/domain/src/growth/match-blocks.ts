@@ -2,6 +2,8 @@ import { outOfBounds, refused, type Refusal, type Refused } from '../geometry/re
 import type { CrackLaw } from '../materials/crack-law';
 import { LOWEST_RATIO } from '../materials/crack-law-scopes';
 import type { StressBlock } from './growth-rates';
+import type { LawConditions } from './laws/rate-per-cycle';
+import { temperatureRefusals } from './laws/temperature-refusals';
 
 /** Whether a law may be used for a histogram, and what must be said with it. */
 export interface MatchedBlocks {
@@ -15,13 +17,18 @@ const dependsOnRatio = ({ form, threshold }: CrackLaw): boolean =>
 
 /**
  * Holds the stress ratio of every block against the law's own. A law for a lower ratio than the cycle's is
- * refused, as it would grow too little; one for a higher ratio is taken with a word.
+ * refused, as it would grow too little; one for a higher ratio is taken with a word. The temperature, where given or
+ * needed, must be one the law is for.
  */
 export function matchBlocks(
   law: CrackLaw,
   blocks: readonly StressBlock[],
+  { temperatureC }: LawConditions = {},
 ): MatchedBlocks | Refused {
-  const refusals = blocks.flatMap((block, i) => refusalsOf(law, block, i));
+  const refusals = [
+    ...blocks.flatMap((block, i) => refusalsOf(law, block, i)),
+    ...temperatureRefusals(law, temperatureC),
+  ];
   if (refusals.length > 0) return refused(...refusals);
   return { status: 'matched', cautions: cautionsOf(law, blocks) };
 }

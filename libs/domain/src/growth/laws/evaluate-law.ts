@@ -1,8 +1,10 @@
 import { outOfBounds, refused, type NumberRule, type Refused } from '../../geometry/refusal';
 import type { CrackLaw } from '../../materials/crack-law';
+import { crackLaw } from '../../materials/crack-law-library';
 import { LOWEST_RATIO } from '../../materials/crack-law-scopes';
 import { stabilityMargin } from './forman';
 import { ratePerCycle, type LawConditions } from './rate-per-cycle';
+import { temperatureRefusals } from './temperature-refusals';
 
 /** One cycle at one tip. */
 export interface LawPoint extends LawConditions {
@@ -23,7 +25,10 @@ export type CycleGrowth =
 
 /** Growth per cycle by a law, refused outside the limits the law was published with. */
 export function evaluateLaw(law: CrackLaw, point: LawPoint): CycleGrowth | Refused {
-  const broken = outOfBounds(rulesOf(law, point));
+  const broken = [
+    ...outOfBounds(rulesOf(law, point)),
+    ...temperatureRefusals(law, point.temperatureC),
+  ];
   if (broken.length > 0) return refused(...broken);
   const { rangeMPaSqrtMm: range, stressRatio } = point;
   if (law.form === 'forman' && !(stabilityMargin(range, stressRatio, law.toughnessMPaSqrtMm) > 0)) {
@@ -34,10 +39,16 @@ export function evaluateLaw(law: CrackLaw, point: LawPoint): CycleGrowth | Refus
   }
   const mmPerCycle = ratePerCycle(law, point)(range, stressRatio);
   if (mmPerCycle === 0) return { status: 'below threshold' };
-  return { status: 'grows', mmPerCycle, cautions: cautionsOf(law, point) };
+  return { status: 'grows', mmPerCycle, cautions: cautionsOf(law, point, mmPerCycle) };
 }
 
-function cautionsOf({ scope }: CrackLaw, { rangeMPaSqrtMm, stressRatio }: LawPoint): string[] {
+const AIR = crackLaw('ferritic-air-code');
+const inAir = ({ rangeMPaSqrtMm, stressRatio }: LawPoint): number =>
+  AIR ? ratePerCycle(AIR)(rangeMPaSqrtMm, stressRatio) : 0;
+
+function cautionsOf(law: CrackLaw, point: LawPoint, mmPerCycle: number): string[] {
+  const { scope, form } = law;
+  const { rangeMPaSqrtMm, stressRatio } = point;
   const [least] = scope.rangeMPaSqrtMm;
   return [
     stressRatio < scope.stressRatio[0]
@@ -46,12 +57,14 @@ function cautionsOf({ scope }: CrackLaw, { rangeMPaSqrtMm, stressRatio }: LawPoi
     rangeMPaSqrtMm < least
       ? 'ΔK is below the range in which the law was measured; near a threshold real growth is slower.'
       : null,
+    form === 'asme ferritic water' && mmPerCycle < inAir(point)
+      ? 'At this small ΔK the reference curve in air is the higher one: take the larger of the two (common practice).'
+      : null,
   ].filter((text) => text !== null);
 }
 
 function rulesOf({ scope, title }: CrackLaw, point: LawPoint): readonly NumberRule[] {
   const [lowRatio, highRatio] = scope.stressRatio;
-  const [cold, hot] = scope.temperatureC;
   return [
     {
       input: 'rangeMPaSqrtMm',
@@ -71,18 +84,5 @@ function rulesOf({ scope, title }: CrackLaw, point: LawPoint): readonly NumberRu
       max: highRatio,
       instead: `Choose a law for this ratio; ${title} is not for it.`,
     },
-    ...(point.temperatureC === undefined
-      ? []
-      : [
-          {
-            input: 'temperatureC',
-            name: 'Temperature',
-            unit: '°C',
-            value: point.temperatureC,
-            min: cold,
-            max: hot,
-            instead: 'Choose a law for this temperature, or scale one by the modulus.',
-          },
-        ]),
   ];
 }

@@ -324,6 +324,27 @@ describe('one cycle by a law', () => {
     expect(evaluateLaw(upper, wrong)).toMatchObject({ status: 'refused', refusals: [{ input }] });
   });
 
+  it('is refused where the law needs a temperature and none is given', () => {
+    const austenitic = law('austenitic-air-code');
+    expect(evaluateLaw(austenitic, point)).toMatchObject({
+      status: 'refused',
+      refusals: [{ input: 'temperatureC', value: null }],
+    });
+    expect(evaluateLaw(austenitic, { ...point, temperatureC: 300 })).toMatchObject({
+      status: 'grows',
+    });
+  });
+
+  it('says so where the curve in air is above the one in water', () => {
+    const water = law('ferritic-water-code');
+    expect(evaluateLaw(water, { rangeMPaSqrtMm: 190, stressRatio: 0 })).toMatchObject({
+      cautions: [expect.stringMatching(/larger of the two/)],
+    });
+    expect(evaluateLaw(water, { rangeMPaSqrtMm: 600, stressRatio: 0 })).toMatchObject({
+      cautions: [],
+    });
+  });
+
   it('is refused at a stress ratio above the law’s', () => {
     const low = evaluateLaw(law('steel-air-low-upper'), point);
     expect(low).toMatchObject({ status: 'refused', refusals: [{ input: 'stressRatio' }] });

@@ -1,8 +1,5 @@
 import { SECONDS_PER } from '../../units/time-rate';
 
-/** Below this frequency corrosion has time to act in every cycle of the marine laws [Hz]. */
-export const SLOW_HZ = 1;
-
 /**
  * Growth per year of so many cycles a second, for the share of the time in which they come.
  * @param growth growth per cycle, da/dN [mm/cycle]

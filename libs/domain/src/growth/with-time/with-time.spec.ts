@@ -2,6 +2,8 @@ import fc from 'fast-check';
 import type { TimeLaw } from '../../materials/time-law';
 import { timeLaw, TIME_LAWS } from '../../materials/time-law-library';
 import { arrhenius } from './arrhenius';
+import { cyclicRate } from './cycle-frequency';
+import { frequencyCaution } from './frequency-caution';
 import { corrosionLife, corrosionRate } from './corrosion-life';
 import { netDepthRate, stressRise, wallAfter, yearsToShare, type Thinning } from './thinning';
 import { stressCorrosionRates, superposed, withThinning, type TimeRates } from './time-rates';
@@ -328,5 +330,18 @@ describe('rates that know the time', () => {
   it('lose depth at the mouth where the cracked face corrodes', () => {
     expect(at(withThinning(steady(0.4, 0.2), CRACKED))).toEqual({ a: 0.30000000000000004, c: 0.2 });
     expect(at(withThinning(steady(0.4, 0.2), OPPOSITE))).toEqual({ a: 0.4, c: 0.2 });
+  });
+});
+
+describe('the frequency of cycles', () => {
+  it('turns growth per cycle into growth per year', () => {
+    expect(cyclicRate(1e-9, 1, 0.5)).toBeCloseTo(0.0157788, 9);
+    expect(cyclicRate(1e-9, 0, 1)).toBe(0);
+  });
+
+  it('is spoken of outside the tests behind the marine laws', () => {
+    expect(frequencyCaution(0.01)).toMatch(/faster/);
+    expect(frequencyCaution(10)).toMatch(/safe side/);
+    expect([0.1, 0.5, 1].map(frequencyCaution)).toEqual([null, null, null]);
   });
 });
