@@ -66,7 +66,8 @@ function maximum(f: (x: number) => number, from: number, to: number): number {
   let [low, high] = [from, to];
   let [left, right] = [high - GOLDEN * (high - low), low + GOLDEN * (high - low)];
   let [atLeft, atRight] = [f(left), f(right)];
-  while (high - low > 1e-9 * to) {
+  // at a maximum the value is off by the square of the distance only
+  while (high - low > 1e-6 * to) {
     if (atLeft < atRight) {
       [low, left, atLeft] = [left, right, atRight];
       right = low + GOLDEN * (high - low);

@@ -1,4 +1,4 @@
-import { outOfBounds, refused, type Refused } from '../../geometry/refusal';
+import { outOfBounds, refused, type NumberRule, type Refused } from '../../geometry/refusal';
 import { normalBelow } from '../../numerics/normal-distribution';
 import type { ChangeWithError } from './compare-with-prediction';
 
@@ -22,38 +22,7 @@ const FEWEST = 3;
 export function techniqueDifference(
   changes: readonly ChangeWithError[],
 ): TechniqueDifference | Refused {
-  const refusals = outOfBounds([
-    {
-      input: 'changes',
-      name: 'Number of re-measured flaws',
-      unit: '',
-      value: changes.length,
-      min: FEWEST,
-      max: 1e6,
-      instead: 'Use more flaws that are not expected to grow.',
-    },
-    ...changes.flatMap(({ changeMm, sdMm }, i) => [
-      {
-        input: `changes.${i}.changeMm`,
-        name: 'Change',
-        unit: 'mm',
-        value: changeMm,
-        min: -1000,
-        max: 1000,
-        instead: 'Give it in millimetres.',
-      },
-      {
-        input: `changes.${i}.sdMm`,
-        name: 'Error of the change',
-        unit: 'mm',
-        value: sdMm,
-        min: 0,
-        max: 1000,
-        above: true,
-        instead: 'Give the standard deviation of the change in millimetres.',
-      },
-    ]),
-  ]);
+  const refusals = outOfBounds(rulesOf(changes));
   if (refusals.length > 0) return refused(...refusals);
   const weights = changes.map(({ sdMm }) => 1 / (sdMm * sdMm));
   const all = weights.reduce((sum, weight) => sum + weight, 0);
@@ -74,3 +43,36 @@ export function techniqueDifference(
       : `No systematic difference between the two inspections (${numbers}).`,
   };
 }
+
+const rulesOf = (changes: readonly ChangeWithError[]): readonly NumberRule[] => [
+  {
+    input: 'changes',
+    name: 'Number of re-measured flaws',
+    unit: '',
+    value: changes.length,
+    min: FEWEST,
+    max: 1e6,
+    instead: 'Use more flaws that are not expected to grow.',
+  },
+  ...changes.flatMap(({ changeMm, sdMm }, i) => [
+    {
+      input: `changes.${i}.changeMm`,
+      name: 'Change',
+      unit: 'mm',
+      value: changeMm,
+      min: -1000,
+      max: 1000,
+      instead: 'Give it in millimetres.',
+    },
+    {
+      input: `changes.${i}.sdMm`,
+      name: 'Error of the change',
+      unit: 'mm',
+      value: sdMm,
+      min: 0,
+      max: 1000,
+      above: true,
+      instead: 'Give the standard deviation of the change in millimetres.',
+    },
+  ]),
+];
