@@ -31,11 +31,11 @@ const THINNING_CRACK = {
 
 const added = () => {
   const into = { a: 0, c: 0 };
-  const part = (a: number) => (_a: number, _c: number, _years: number, one: typeof into) => {
+  const part = (a: number) => (_a: number, _c: number, one: typeof into) => {
     one.a = a;
     one.c = 0;
   };
-  superposed(part(2000 * 1e-4), part(0.15))(1, 1, 0, into);
+  superposed(part(2000 * 1e-4), part(0.15))(1, 1, into, 0);
   return into.a;
 };
 

@@ -1,12 +1,13 @@
 import fc from 'fast-check';
 import type { TimeLaw } from '../../materials/time-law';
 import { timeLaw, TIME_LAWS } from '../../materials/time-law-library';
+import type { RatesAt } from '../growth-walk';
 import { arrhenius } from './arrhenius';
 import { cyclicRate } from './cycle-frequency';
 import { frequencyCaution } from './frequency-caution';
 import { corrosionLife, corrosionRate } from './corrosion-life';
 import { netDepthRate, stressRise, wallAfter, yearsToShare, type Thinning } from './thinning';
-import { stressCorrosionRates, superposed, withThinning, type TimeRates } from './time-rates';
+import { stressCorrosionRates, superposed, withThinning } from './time-rates';
 import { evaluateTimeLaw, rateWithTime } from './time-rate';
 import type { ThinningCrack } from './thinning-crack';
 import { yearsToToughness } from './years-to-toughness';
@@ -300,14 +301,14 @@ describe('corrosion of a wall', () => {
 
 describe('rates that know the time', () => {
   const steady =
-    (a: number, c: number): TimeRates =>
-    (_a, _c, _years, into) => {
+    (a: number, c: number): RatesAt =>
+    (_a, _c, into) => {
       into.a = a;
       into.c = c;
     };
-  const at = (rates: TimeRates, years = 0) => {
+  const at = (rates: RatesAt, years = 0) => {
     const into = { a: Number.NaN, c: Number.NaN };
-    rates(2, 5, years, into);
+    rates(2, 5, into, years);
     return into;
   };
 
@@ -330,6 +331,7 @@ describe('rates that know the time', () => {
   it('lose depth at the mouth where the cracked face corrodes', () => {
     expect(at(withThinning(steady(0.4, 0.2), CRACKED))).toEqual({ a: 0.30000000000000004, c: 0.2 });
     expect(at(withThinning(steady(0.4, 0.2), OPPOSITE))).toEqual({ a: 0.4, c: 0.2 });
+    expect(at(withThinning(steady(0.05, 0.2), CRACKED))).toEqual({ a: 0, c: 0.2 });
   });
 });
 
