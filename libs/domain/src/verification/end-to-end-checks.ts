@@ -54,7 +54,7 @@ function life(kmat: number, cyclesPerYear: number) {
       { key: 'diagram', margin: (a, c) => margin(a, c, kmat, 1) },
       { key: 'depth', margin: (a) => 0.8 - a / 25 },
     ],
-    { horizonYears: 1000 },
+    { horizonYears: 1000, tolerance: 1e-8 },
   );
   return run.states[run.states.length - 1] ?? { years: Number.NaN, a: Number.NaN, c: Number.NaN };
 }
