@@ -1,28 +1,25 @@
-import { legendreRule } from '../../numerics/gauss-legendre';
 import { edgeBendingFactor } from './edge-crack';
+import { integralTo, runningIntegral } from './running-integral';
 import { stripCoefficient, type FaceDegree } from './strip-coefficient';
 
-const RULE = legendreRule(20);
+const DEEPEST = 0.9;
+const STEPS = 180;
 
-/** ∫₀^α x ⁿ⁺¹ Gn(x) Fb(x) dx: how far a stress (x/t)ⁿ turns the strip about its crack. */
-function turning(degree: FaceDegree, alpha: number): number {
-  let sum = 0;
-  for (const { node, weight } of RULE) {
-    const x = (alpha * (node + 1)) / 2;
-    sum += weight * x ** (degree + 1) * stripCoefficient(degree, x) * edgeBendingFactor(x);
-  }
-  return (alpha / 2) * sum;
-}
+/** ∫ xⁿ⁺¹ Gn Fb dx per degree: how far a stress (x/t)ⁿ turns the strip about its crack. */
+const TURNING = ([0, 1, 2, 3, 4] as const).map((n) =>
+  runningIntegral(
+    (x) => x ** (n + 1) * stripCoefficient(n, x) * edgeBendingFactor(x),
+    DEEPEST,
+    STEPS,
+  ),
+);
+/** ∫ x Fb² dx: how far bending turns it. */
+const YIELDING = runningIntegral((x) => x * edgeBendingFactor(x) ** 2, DEEPEST, STEPS);
 
-/** ∫₀^α x Fb² dx: how far bending turns it. */
-function yielding(alpha: number): number {
-  let sum = 0;
-  for (const { node, weight } of RULE) {
-    const x = (alpha * (node + 1)) / 2;
-    sum += weight * x * edgeBendingFactor(x) ** 2;
-  }
-  return (alpha / 2) * sum;
-}
+const turning = (degree: FaceDegree, alpha: number): number => {
+  const running = TURNING[degree];
+  return running ? integralTo(running, alpha) : 0;
+};
 
 /**
  * Edge crack in a strip whose ends cannot turn, stress σn (x/t)ⁿ on its faces: H in K = σn H √(πa). The crack
@@ -37,9 +34,10 @@ function yielding(alpha: number): number {
  * @example heldStripFactor(0, 0.5, 1e9) // 2.823545
  */
 export function heldStripFactor(degree: FaceDegree, alpha: number, restraint: number): number {
-  const depth = Math.min(alpha, 0.9);
-  const compliance = 6 * Math.PI;
-  const moment = (compliance * turning(degree, depth)) / (compliance * yielding(depth) + restraint);
+  const depth = Math.min(alpha, DEEPEST);
+  const moment =
+    (6 * Math.PI * turning(degree, depth)) /
+    (6 * Math.PI * integralTo(YIELDING, depth) + restraint);
   return depth ** degree * stripCoefficient(degree, depth) - moment * edgeBendingFactor(depth);
 }
 
@@ -53,8 +51,8 @@ export function heldStripFactor(degree: FaceDegree, alpha: number, restraint: nu
  * @example heldStripBending(0.4, 1e9) // 1.260795
  */
 export function heldStripBending(alpha: number, restraint: number): number {
-  const depth = Math.min(alpha, 0.9);
-  const shed = 6 * Math.PI * yielding(depth);
+  const depth = Math.min(alpha, DEEPEST);
+  const shed = 6 * Math.PI * integralTo(YIELDING, depth);
   return (edgeBendingFactor(depth) * restraint) / (shed + restraint);
 }
 
