@@ -1,5 +1,5 @@
-import { dormandPrince } from '../numerics/dormand-prince';
-import { firstEvent, sizeIn, stepError, type RatesAt, type StateEvent } from './growth-walk';
+import { dormandPrince, type Stepper } from '../numerics/dormand-prince';
+import { firstEvent, sizeIn, type RatesAt, type StateEvent } from './growth-walk';
 import type { Rates } from './growth-rates';
 import type { GrowthLimit, GrowthOptions, GrowthRun, SizeAt } from './integrate-growth';
 
@@ -37,7 +37,7 @@ export function growWithTime(
   let h = maxStep / 5;
   for (let n = 0; n < MOST_STEPS; n++) {
     stepper.step(y, h);
-    const error = stepError(stepper, tolerance);
+    const error = errorOf(stepper, horizonYears) / tolerance;
     if (!(error <= 1) && h > SMALLEST_STEP) {
       h = Math.max(
         h * (Number.isFinite(error) ? Math.max(0.9 * error ** -0.2, 0.2) : 0.2),
@@ -55,6 +55,10 @@ export function growWithTime(
   }
   return done('step limit');
 }
+
+/** Error of the last step: of the time against the horizon, of the sizes in the logarithm. */
+const errorOf = ({ error: [years = 0, depth = 0, length = 0] }: Stepper, horizonYears: number) =>
+  Math.max(Math.abs(years) / horizonYears, Math.abs(depth), Math.abs(length));
 
 function slopesOf(rates: RatesAt, horizonYears: number) {
   const rate: Rates = { a: 0, c: 0 };
