@@ -1,6 +1,8 @@
 import type { Crack } from '../../geometry/crack';
 import type { MPa } from '../../units/quantity';
 import { bulgingFactor } from './bulging-factor';
+import { bendingRelief } from './plate-surface-api-reference';
+import type { ReferenceStressSolution } from './solution';
 
 /**
  * Surface bulging factor of an axial part-wall crack: Ms = 1/[1 − a/t + (a/t)/Mt(λa)], λa = 1.818 c/√(Ri a).
@@ -32,9 +34,21 @@ export function cylinderAxialApiReference(crack: Crack, membrane: MPa, bending: 
   const { a, c, thickness } = crack;
   if (!(a < thickness)) return Number.POSITIVE_INFINITY as MPa;
   const alpha = a / thickness / (1 + thickness / c);
-  const relief = Math.max(1 - 20 * (a / (2 * c)) ** 0.75 * alpha ** 3, 0);
   const left = (1 - alpha) ** 2;
-  const bent = relief * Math.abs(bending);
+  const bent = bendingRelief(crack) * Math.abs(bending);
   const held = 3 * surfaceBulgingFactor(crack) * membrane * left;
   return ((bent + Math.hypot(bent, held)) / (3 * left)) as MPa;
 }
+
+export const CYLINDER_AXIAL_API_REFERENCE: ReferenceStressSolution = {
+  key: 'cylinder-axial-api',
+  title: 'Axial surface flaw in a cylinder, second form',
+  source: 'API 579-1 equation 9C.85 (seen in a secondary source that cites it)',
+  formula:
+    'σref = [g Pb + √((g Pb)² + 9 (Ms Pm (1 − α)²)²)]/[3 (1 − α)²], Ms = 1/[1 − a/t + (a/t)/Mt(λa)]',
+  basis: 'Local collapse of the ligament with bulging; exact for a vanishing flaw.',
+  scope: 'local',
+  vanishing: 'exact',
+  limits: [],
+  stress: cylinderAxialApiReference,
+};

@@ -34,6 +34,8 @@ export const CYLINDER_AXIAL_REFERENCE: ReferenceStressSolution = {
     'σref = 1.2 Ms Pm + 2 Pb/[3 (1 − α″)²], Ms = [1 − a/(t MT)]/(1 − a/t), MT = √(1 + 1.6 c²/(Rm t))',
   basis:
     'Local collapse of the ligament with bulging. The factor 1.2 stands for a vanishing flaw too: a deliberate margin of the form.',
+  scope: 'local',
+  vanishing: 'margin',
   limits: [],
   stress: cylinderAxialReference,
 };

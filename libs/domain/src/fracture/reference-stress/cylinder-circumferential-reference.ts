@@ -45,7 +45,10 @@ export const CYLINDER_CIRCUMFERENTIAL_REFERENCE: ReferenceStressSolution = {
   source: SOURCE,
   formula:
     'σref = Pm [π (1 − a/t) + 2 (a/t) sin(c/Ri)]/[(1 − a/t)(π − (c/Ri)(a/t))] + 2 Pb/[3 (1 − α″)²]',
-  basis: 'Collapse of the cracked section of the cylinder; bending of the shell wall added.',
+  basis:
+    'Collapse of the cracked section of the cylinder; bending of the shell wall added, so that a vanishing flaw gives Pm + 2 Pb/3.',
+  scope: 'global',
+  vanishing: 'margin',
   limits: [ANGLE_LIMIT],
   stress: cylinderCircumferentialReference,
 };

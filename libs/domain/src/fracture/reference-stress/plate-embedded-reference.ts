@@ -32,6 +32,8 @@ export const PLATE_EMBEDDED_REFERENCE: ReferenceStressSolution = {
   source: 'BS 7910 Annex P, embedded flaw (from memory)',
   formula: 'σref = [b + √(b² + 9 Pm² D)]/(3 D), b = Pb + 3 Pm α″, D = (1 − α″)² + 4 p α″/t',
   basis: 'Equilibrium of the two ligaments, flaw spread over the wall beside it.',
+  scope: 'local',
+  vanishing: 'exact',
   limits: [],
   stress: plateEmbeddedReference,
 };

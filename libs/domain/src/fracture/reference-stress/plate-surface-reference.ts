@@ -57,6 +57,8 @@ export const PLATE_SURFACE_REFERENCE: ReferenceStressSolution = {
   source: 'BS 7910:2013 Annex P.6.1, normal bending restraint (from memory)',
   formula: 'σref = [Pb + √(Pb² + 9 Pm² (1 − α″)²)] / [3 (1 − α″)²], α″ = (a/t)/(1 + t/c)',
   basis: 'Local collapse of the ligament; the wall beside the flaw holds it against bending.',
+  scope: 'local',
+  vanishing: 'exact',
   limits: [],
   stress: plateSurfaceReference,
 };

@@ -11,6 +11,10 @@ export interface ReferenceStressSolution {
   readonly formula: string;
   /** What the reader must know about its basis. */
   readonly basis: string;
+  /** What collapses: the ligament ahead of the flaw, or the whole section of the body. */
+  readonly scope: 'local' | 'global';
+  /** What a vanishing flaw gives: the load ratio of the sound wall, or that with a margin of the form's own. */
+  readonly vanishing: 'exact' | 'margin';
   readonly limits: readonly Limit[];
   /** Reference stress from primary membrane and bending [MPa]; Infinity once the ligament has failed. */
   readonly stress: (crack: Crack, membrane: MPa, bending: MPa) => MPa;
