@@ -75,7 +75,10 @@ describe('the life of a growing flaw', () => {
     expect([...errors].sort((x, y) => x - y)[20]).toBeLessThan(1e-5);
   });
 
-  it('takes fewer than 400 evaluations', () => {
-    for (const life of lives) expect(life({}).evaluations).toBeLessThan(400);
+  it('takes some sixty evaluations, twice as many where the kinks are many', () => {
+    const evaluations = lives.map((life) => life({}).evaluations);
+    const mean = evaluations.reduce((sum, n) => sum + n, 0) / evaluations.length;
+    expect(mean).toBeLessThan(65);
+    expect(Math.max(...evaluations)).toBeLessThan(140);
   });
 });

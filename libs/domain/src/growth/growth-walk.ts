@@ -21,9 +21,9 @@ export const sizeIn = (state: GrowthStateVector) => ({
 });
 
 /**
- * Stepper over the way of the flaw. The step variable is the larger of d ln a and d ln c: a flaw whose
- * deepest point lies under the threshold while its ends grow is then no special case. Where nothing grows
- * the years become infinite.
+ * Stepper over the way of the flaw, s = ln a + ln c: ds/dt is above 0 while either point of the front grows, so
+ * that a flaw whose deepest point lies under the threshold while its ends grow is no special case, and nothing
+ * jumps where one point overtakes the other. Where nothing grows the years become infinite.
  */
 export function growthStepper(rates: RatesAt, counted: () => void): Stepper {
   const rate: Rates = { a: 0, c: 0 };
@@ -34,20 +34,32 @@ export function growthStepper(rates: RatesAt, counted: () => void): Stepper {
     counted();
     const ra = rate.a / a;
     const rc = rate.c / c;
-    const fastest = Math.max(ra, rc);
-    slope[0] = 1 / fastest;
-    slope[1] = fastest > 0 ? ra / fastest : 0;
-    slope[2] = fastest > 0 ? rc / fastest : 0;
+    const both = ra + rc;
+    slope[0] = 1 / both;
+    slope[1] = both > 0 ? ra / both : 0;
+    slope[2] = both > 0 ? rc / both : 0;
   });
 }
 
-/** Error of the last step as a multiple of what is allowed: relative in time, in the logarithm of the sizes. */
-export function stepError({ next, error }: Stepper, tolerance: number): number {
-  const years = Math.abs(error[0] as number) / (tolerance * Math.abs(next[0] as number) + 1e-12);
-  const depth = Math.abs(error[1] as number) / tolerance;
-  const length = Math.abs(error[2] as number) / tolerance;
-  return Math.max(years, depth, length);
+/** Way after which the years still to come no longer count. */
+const AHEAD = 0.5;
+
+/**
+ * Error of the last step as a multiple of what is allowed: relative in time; in the logarithm of the sizes by the
+ * share of the life that is still to come, the only part a wrong size can spoil.
+ */
+export function stepError({ next, error, last }: Stepper, tolerance: number): number {
+  const gone = next[0] as number;
+  const years = Math.abs(error[0] as number) / (tolerance * Math.abs(gone) + 1e-12);
+  const ahead = AHEAD * (last[0] as number);
+  const weight = Number.isFinite(ahead) ? ahead / (gone + ahead) : 1;
+  const depth = Math.abs(error[1] as number);
+  const length = Math.abs(error[2] as number);
+  return Math.max(years, (weight * Math.max(depth, length)) / (SIZE_SHARE * tolerance));
 }
+
+/** A wrong size costs several times as much life, by the exponent of the law. */
+const SIZE_SHARE = 0.3;
 
 /** The earliest event inside the step, found by stepping again from its start with a shorter step. */
 export function firstEvent(
@@ -57,18 +69,59 @@ export function firstEvent(
   events: readonly StateEvent[],
 ): { readonly key: string; readonly h: number } | null {
   const end = Float64Array.from(stepper.next);
-  let first: { key: string; h: number } | null = null;
-  for (const { key, margin } of events) {
-    if (margin(end) > 0) continue;
-    const after = (length: number) => {
-      if (length === 0) return margin(y);
-      stepper.step(y, length);
-      return margin(stepper.next);
-    };
-    const root = findRoot(after, 0, h, { tolerance: 1e-12 });
-    // a margin already spent at the start of the step ends it there
-    const length = root.status === 'found' ? root.x : 0;
-    if (!first || length < first.h) first = { key, h: length };
+  const after = ({ margin }: StateEvent, length: number) => {
+    if (length === 0) return margin(y);
+    stepper.step(y, length);
+    return margin(stepper.next);
+  };
+  const found = events
+    .filter(({ margin }) => !(margin(end) > 0))
+    .map((event) => ({ key: event.key, h: crossing(event, after, 0, h) }));
+  return earliest(found, ({ h: length }) => length);
+}
+
+/**
+ * The earliest event inside the step just taken, by the curve through it: no rate is asked for. Margins are looked
+ * at in so many places of the step; between two of them one is not seen to fall and rise again.
+ */
+export function firstEventOnCurve(
+  stepper: Stepper,
+  y: GrowthStateVector,
+  h: number,
+  events: readonly StateEvent[],
+  looks: number,
+): { readonly key: string; readonly share: number } | null {
+  const state = new Float64Array(y.length);
+  const marginAt = (event: StateEvent, share: number) => {
+    if (share === 1) return event.margin(stepper.next);
+    stepper.between(y, h, share, state);
+    return event.margin(state);
+  };
+  for (let look = 1; look <= looks; look++) {
+    const [from, to] = [(look - 1) / looks, look / looks];
+    const found = events
+      .filter((event) => !(marginAt(event, to) > 0))
+      .map((event) => ({ key: event.key, share: crossing(event, marginAt, from, to) }));
+    const first = earliest(found, ({ share }) => share);
+    if (first) return first;
   }
-  return first;
+  return null;
+}
+
+function earliest<T>(found: readonly T[], place: (one: T) => number): T | null {
+  return found.reduce<T | null>(
+    (first, one) => (first && place(first) <= place(one) ? first : one),
+    null,
+  );
+}
+
+function crossing(
+  event: StateEvent,
+  marginAt: (event: StateEvent, share: number) => number,
+  from: number,
+  to: number,
+): number {
+  const root = findRoot((share) => marginAt(event, share), from, to, { tolerance: 1e-12 });
+  // a margin already spent at the start of the stretch ends it there
+  return root.status === 'found' ? root.x : from;
 }
