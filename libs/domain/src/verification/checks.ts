@@ -1,5 +1,7 @@
 import { CORROSION_EXAMPLE_CHECKS } from './corrosion-example-checks';
 import { CURVATURE_CHECKS } from './curvature-checks';
+import { CURVED_K_CHECKS } from './curved-k-checks';
+import { CURVED_K_ELEMENT_CHECKS } from './curved-k-element-checks';
 import { evaluateRow, type CheckResult, type CheckRow } from './check-row';
 import { DETECTION_CHECKS } from './detection-checks';
 import { DIAGRAM_CHECKS } from './diagram-checks';
@@ -37,9 +39,11 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...TIP_FIELD_CHECKS,
   ...STRESS_INTENSITY_CHECKS,
   ...FLAT_K_CHECKS,
+  ...CURVED_K_CHECKS,
   ...WELD_TOE_CHECKS,
   ...CURVATURE_CHECKS,
   ...FLAT_K_ELEMENT_CHECKS,
+  ...CURVED_K_ELEMENT_CHECKS,
   ...REFERENCE_STRESS_CHECKS,
   ...TOUGHNESS_CHECKS,
   ...MASTER_CURVE_CHECKS,

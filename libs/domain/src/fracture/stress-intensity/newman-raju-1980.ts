@@ -1,6 +1,43 @@
 import type { Crack } from '../../geometry/crack';
+import { DEPTH_RATIO, type Limit } from '../../geometry/limit';
 import type { Degrees, MPa, MPaSqrtMm } from '../../units/quantity';
 import { angularFactor, shapeFactor } from './shape-factor';
+
+const SOURCE = 'Newman and Raju 1980 (from memory)';
+
+/** Limits of the equation. */
+export const NEWMAN_RAJU_1980_LIMITS: readonly Limit[] = [
+  {
+    name: 'a/c',
+    text: '0.2 ≤ a/c ≤ 1',
+    min: 0.2,
+    max: 1,
+    measure: ({ a, c }) => a / c,
+    source: SOURCE,
+    input: 'flaw.lengthMm',
+    instead: 'Use the influence coefficients of the surface flaw, or of the flaw without ends.',
+  },
+  {
+    name: DEPTH_RATIO,
+    text: 'a/t ≤ 0.8',
+    min: 0,
+    max: 0.8,
+    measure: ({ a, thickness }) => a / thickness,
+    source: SOURCE,
+    input: 'flaw.heightMm',
+    instead: 'Treat the flaw as through-wall, or repair.',
+  },
+  {
+    name: 'Ri/t',
+    text: 'Ri/t ≥ 4',
+    min: 4,
+    max: Infinity,
+    measure: ({ insideRadius, thickness }) => insideRadius / thickness,
+    source: SOURCE,
+    input: 'wall.insideDiameterMm',
+    instead: 'Use the influence coefficients of a thick wall.',
+  },
+];
 
 /**
  * K of an axial semi-elliptical crack inside a cylinder under internal pressure, pressure on its faces
@@ -9,7 +46,7 @@ import { angularFactor, shapeFactor } from './shape-factor';
  * @param crack crack and wall: a, c, t, Ri [mm]
  * @param angle parametric angle φ, 90 at the deepest point [°]
  * @returns mode I stress intensity [MPa·√mm]
- * @validity a/c ≤ 1, a/t ≤ 0.8, Ri/t ≥ 4
+ * @validity 0.2 ≤ a/c ≤ 1, a/t ≤ 0.8, Ri/t ≥ 4
  * @source Newman and Raju 1980 (from memory)
  * @example newmanRaju1980(mpa(10), crackOf({ a: 5, c: 12.5, t: 10, Ri: 100 }), 90) // 485.973213016
  */
