@@ -39,6 +39,9 @@ export function cautions(subject: CautionSubject): readonly string[] {
     chi(point.at.kPrimary, point.at.kSecondary, point.lr) > CHI_SIMPLE_LIMIT
       ? 'Secondary stress is large against primary (χ above 4): the interaction term goes beyond the simple form.'
       : null,
+    section.kind === 'edge'
+      ? 'For a flaw through the edge, membrane and bending are those over the width of the plate; bending through its thickness belongs to the membrane stress.'
+      : null,
     ...growthCautions(input),
     input.growth.thinning
       ? 'The wall corrodes while the flaw grows: its least thickness for pressure is not judged here.'

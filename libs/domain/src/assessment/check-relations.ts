@@ -1,6 +1,6 @@
 import type { AssessmentInput } from './assessment-input';
 import type { Refusal } from './assessment-outcome';
-import { isCovered } from '../fracture/select-solutions';
+import { solutionsFor } from '../fracture/select-solutions';
 import { linearised } from '../fracture/stress-intensity/stress-terms';
 import { hasHeight, hasLength, KINDS_OF_WALL } from '../geometry/flaw-kind';
 import { checkGrowth } from './check-growth';
@@ -15,10 +15,9 @@ export const checkRelations = (input: AssessmentInput): readonly Refusal[] => [
   ...checkGrowth(input),
 ];
 
-const kindFitsWall: Rule = (input) => {
-  const { wall, flaw } = input;
+const kindFitsWall: Rule = ({ wall, flaw }) => {
   const kinds = KINDS_OF_WALL[wall.shape];
-  if (kinds.includes(flaw.kind) && isCovered(situationOf(input))) return null;
+  if (kinds.includes(flaw.kind)) return null;
   return {
     input: 'flaw.kind',
     limit: `${wall.shape}: ${kinds.join(', ')}`,
@@ -26,6 +25,27 @@ const kindFitsWall: Rule = (input) => {
     message: `No solution here covers a flaw of kind ${flaw.kind} in a ${wall.shape}.`,
     instead: 'Choose the idealised shape that encloses the flaw, or ask a specialist.',
   };
+};
+
+const chosenSolutionExists: Rule = (input) => {
+  const entry = solutionsFor(situationOf(input));
+  const asked = [
+    ['stressIntensityChoice', entry?.stressIntensity],
+    ['referenceStressChoice', entry?.referenceStress],
+  ] as const;
+  for (const [field, solutions] of asked) {
+    const key = input[field]?.key;
+    const keys = (solutions ?? []).map((each) => each.key);
+    if (key === undefined || keys.includes(key)) continue;
+    return {
+      input: `${field}.key`,
+      limit: keys.join(', '),
+      value: key,
+      message: `The catalogue has no solution called ${key} for this flaw and body.`,
+      instead: 'Take the one that governs, or choose one of the list.',
+    };
+  }
+  return null;
 };
 
 const heightLeavesWall: Rule = ({ wall, flaw, sizing }) => {
@@ -112,6 +132,7 @@ const somePrimaryStress: Rule = ({ stress, wall }) => {
 
 const RULES: readonly Rule[] = [
   kindFitsWall,
+  chosenSolutionExists,
   heightLeavesWall,
   ligamentFits,
   lengthNotBelowHeight,

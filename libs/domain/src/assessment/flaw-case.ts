@@ -1,6 +1,6 @@
 import type { DiagramLine } from '../fracture/fad/diagram-line';
 import type { DiagramMaterial } from '../fracture/fad/option-one';
-import type { FlawSituation } from '../fracture/select-solutions';
+import type { FlawSituation, SolutionWish } from '../fracture/select-solutions';
 import {
   linearised,
   linearTerms,
@@ -41,8 +41,8 @@ export interface FlawCase {
   readonly poissonsRatio: number;
   /** Kmat [MPa·√mm]. */
   readonly toughness: number;
-  /** Length of the attachment whose toe the flaw starts from; null without one [mm]. */
-  readonly attachmentLength: number | null;
+  /** What was asked of the choice of solutions. */
+  readonly wish: SolutionWish;
 }
 
 /** What the choice of solutions depends on. */
@@ -80,7 +80,11 @@ export function flawCase(input: AssessmentInput, line: DiagramLine): FlawCase {
     line,
     poissonsRatio: material.poissonsRatio.value,
     toughness: (material.toughnessMPaSqrtM.value * MPA_SQRT_MM_PER['MPa·√m']) / factors.toughness,
-    attachmentLength: stress.weldToe?.attachmentLengthMm.value ?? null,
+    wish: {
+      stressIntensity: input.stressIntensityChoice?.key ?? null,
+      referenceStress: input.referenceStressChoice?.key ?? null,
+      attachmentLength: stress.weldToe?.attachmentLengthMm.value ?? null,
+    },
   };
 }
 

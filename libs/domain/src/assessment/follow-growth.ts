@@ -1,3 +1,4 @@
+import { growWithTime } from '../growth/grow-with-time';
 import { integrateGrowth, type GrowthLimit, type GrowthRun } from '../growth/integrate-growth';
 import {
   PROXIMITY_RULE,
@@ -90,16 +91,9 @@ function runSection(
     const states = [{ years: 0, ...size }];
     return { stop: 'limit', limit: spent.key, states, distance: 0, evaluations: 0 };
   }
-  // long steps first, to learn how far the way goes; then steps short enough to draw and to meet every limit
-  const scout = integrateGrowth(size, rates, limits, {
-    horizonYears,
-    maxStep: 0.5,
-    tolerance: 1e-3,
-  });
-  return integrateGrowth(size, rates, limits, {
-    horizonYears,
-    maxStep: Math.min(Math.max(scout.distance, 1e-4) / DRAWN_STATES, 0.1),
-  });
+  // a wall that thins may start the growth of a flaw that stands still now
+  if (drivers.thinning) return growWithTime(size, rates, limits, { horizonYears });
+  return integrateGrowth(size, rates, limits, { horizonYears, states: DRAWN_STATES });
 }
 
 function limitsOf(section: Section, drivers: GrowthDrivers, elapsed: number): GrowthLimit[] {

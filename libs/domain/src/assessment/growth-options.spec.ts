@@ -86,6 +86,15 @@ describe('a wall that corrodes', () => {
     expect(lastOf(flaw)?.years).toBeCloseTo((0.8 * 25 - 4) / (0.4 - 0.1 + 0.8 * 0.1), 5);
   });
 
+  it('starts the growth of a flaw that stands still now, once stress has risen', () => {
+    const variation = { membrane: 90, threshold: 380, cycles: 100_000, allowance: 0 };
+    const thinning = { rateMmPerYear: given(0.4), face: 'opposite' as const };
+    expect(assessed(withGrowth(variation, {})).life.end).toBe('no growth');
+    const thin = assessed(withGrowth(variation, { thinning }));
+    expect(thin.life.end).not.toBe('no growth');
+    expect(lastOf(thin)?.heightMm).toBeGreaterThan(4);
+  });
+
   it('raises stress as it thins, so that the flaw ends sooner', () => {
     const loaded = (rate: number) =>
       assessed(

@@ -1,5 +1,6 @@
-import { ratesPerYear } from '../growth/growth-rates';
+import { RATIO_AT_WELDS, ratesPerYear } from '../growth/growth-rates';
 import type { RatesAt } from '../growth/growth-walk';
+import { stabilityMargin } from '../growth/laws/forman';
 import { netDepthRate } from '../growth/with-time/thinning';
 import type { GrowthDrivers } from './drivers';
 import type { Section } from './section';
@@ -46,18 +47,22 @@ export function lawMargin(
   const law = fatigue?.law;
   const blocks = fatigue?.blocks ?? [];
   const most = law && 'form' in law ? law.scope.rangeMPaSqrtMm[1] : Infinity;
+  const fracture = law && 'form' in law && law.form === 'forman' ? law.toughnessMPaSqrtMm : null;
   const longest = withTime ? withTime.law.stressIntensityMPaSqrtMm[1] : Infinity;
   if (!Number.isFinite(most) && !Number.isFinite(longest)) return null;
   return (a, c, years) => {
     const factor = rise(elapsed + years);
     evaluator.take(crackAt(a, c, elapsed + years));
     let room = 1;
-    for (const { membraneRangeMPa, bendingRangeMPa } of blocks) {
+    for (const { membraneRangeMPa, bendingRangeMPa, stressRatio = RATIO_AT_WELDS } of blocks) {
       const range = Math.max(
         evaluator.deepest(membraneRangeMPa, bendingRangeMPa),
         evaluator.end(membraneRangeMPa, bendingRangeMPa),
       );
       if (Number.isFinite(most)) room = Math.min(room, 1 - (factor * range) / most);
+      if (fracture !== null) {
+        room = Math.min(room, stabilityMargin(factor * range, stressRatio, fracture) / fracture);
+      }
     }
     if (Number.isFinite(longest)) {
       const k = evaluator.sustained(factor);

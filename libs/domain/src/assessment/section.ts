@@ -1,4 +1,8 @@
-import { selectSolutions, type FlawSituation } from '../fracture/select-solutions';
+import {
+  selectSolutions,
+  type FlawSituation,
+  type SolutionWish,
+} from '../fracture/select-solutions';
 import {
   fromOtherFace,
   isCurved,
@@ -52,7 +56,10 @@ export function sectionOf(
     situation: { ...turned.situation, kind, face },
     facePressure: pressureOnFaces(flaw, kind, face),
   };
-  const evaluator = new SectionEvaluator(placed, selectSolutions(placed.situation));
+  const evaluator = new SectionEvaluator(
+    placed,
+    selectSolutions(placed.situation, wishOf(placed, flaw)),
+  );
   const { stressIntensity, referenceStress } = evaluator.solutions;
   const limits = [...stressIntensity.limits, ...referenceStress.limits];
   const { thickness } = placed.wall;
@@ -82,6 +89,12 @@ export function sectionOf(
     shown: (a, c) => shownSize(placed.situation, a, c, thickness),
   };
 }
+
+/** What was chosen by hand holds for the flaw as given; one that has changed its kind takes what governs. */
+const wishOf = (placed: FlawCase, given: FlawCase): SolutionWish =>
+  placed.situation.kind === given.situation.kind
+    ? given.wish
+    : { ...given.wish, stressIntensity: null, referenceStress: null };
 
 const isBent = ({ primary }: FlawCase): boolean => primary.bending !== 0 || isCurved(primary);
 

@@ -1,25 +1,9 @@
-import {
-  CYLINDER_CIRCUMFERENTIAL_OUTSIDE_REFERENCE,
-  CYLINDER_CIRCUMFERENTIAL_REFERENCE,
-} from './reference-stress/cylinder-circumferential-reference';
-import {
-  CYLINDER_AXIAL_OUTSIDE_REFERENCE,
-  CYLINDER_AXIAL_REFERENCE,
-} from './reference-stress/cylinder-axial-reference';
-import { PLATE_EMBEDDED_REFERENCE } from './reference-stress/plate-embedded-reference';
-import { PLATE_SURFACE_REFERENCE } from './reference-stress/plate-surface-reference';
 import type { FlawKind, WallShape } from '../geometry/flaw-kind';
+import type { Mm } from '../units/quantity';
+import { CATALOGUE, type CatalogueEntry } from './catalogue';
 import type { ReferenceStressSolution } from './reference-stress/solution';
-import { CYLINDER_EMBEDDED_K } from './stress-intensity/cylinder-embedded-k';
-import {
-  CYLINDER_AXIAL_INSIDE_K,
-  CYLINDER_AXIAL_OUTSIDE_K,
-  CYLINDER_CIRCUMFERENTIAL_INSIDE_K,
-  CYLINDER_CIRCUMFERENTIAL_OUTSIDE_K,
-} from './stress-intensity/cylinder-surface-k';
-import { PLATE_EMBEDDED_K } from './stress-intensity/plate-embedded-k';
-import { PLATE_SURFACE_K } from './stress-intensity/plate-surface-k';
 import type { StressIntensitySolution } from './stress-intensity/solution';
+import { withWeldToe } from './stress-intensity/with-weld-toe';
 
 /** What the choice of a solution depends on. */
 export interface FlawSituation {
@@ -30,45 +14,60 @@ export interface FlawSituation {
   readonly flawedSides: 'one' | 'both';
 }
 
+/** What may be asked of the choice. */
+export interface SolutionWish {
+  /** Key of another K solution of the situation; null for the one that governs. */
+  readonly stressIntensity: string | null;
+  readonly referenceStress: string | null;
+  /** Length of the attachment whose toe the flaw starts from; null without one [mm]. */
+  readonly attachmentLength: number | null;
+}
+
 /** The two solutions a flaw is assessed with. */
 export interface ChosenSolutions {
   readonly stressIntensity: StressIntensitySolution;
   readonly referenceStress: ReferenceStressSolution;
 }
 
-const pair = (
-  stressIntensity: StressIntensitySolution,
-  referenceStress: ReferenceStressSolution,
-): ChosenSolutions => ({ stressIntensity, referenceStress });
+const NO_WISH: SolutionWish = {
+  stressIntensity: null,
+  referenceStress: null,
+  attachmentLength: null,
+};
 
-/** The catalogue by situation: a new solution is one new file and one line here. */
-export const CATALOGUE = {
-  'plate surface': pair(PLATE_SURFACE_K, PLATE_SURFACE_REFERENCE),
-  'plate embedded': pair(PLATE_EMBEDDED_K, PLATE_EMBEDDED_REFERENCE),
-  'cylinder embedded': pair(CYLINDER_EMBEDDED_K, PLATE_EMBEDDED_REFERENCE),
-  'axial inside': pair(CYLINDER_AXIAL_INSIDE_K, CYLINDER_AXIAL_REFERENCE),
-  'axial outside': pair(CYLINDER_AXIAL_OUTSIDE_K, CYLINDER_AXIAL_OUTSIDE_REFERENCE),
-  'circumferential inside': pair(
-    CYLINDER_CIRCUMFERENTIAL_INSIDE_K,
-    CYLINDER_CIRCUMFERENTIAL_REFERENCE,
-  ),
-  'circumferential outside': pair(
-    CYLINDER_CIRCUMFERENTIAL_OUTSIDE_K,
-    CYLINDER_CIRCUMFERENTIAL_OUTSIDE_REFERENCE,
-  ),
-} as const satisfies Readonly<Record<string, ChosenSolutions>>;
+/** Kinds of flaw that may start from the toe of a weld. */
+const AT_TOE: ReadonlySet<FlawKind> = new Set(['surface', 'extended surface']);
 
-const placeOf = ({ shape, kind, face, orientation }: FlawSituation): string =>
-  shape === 'cylinder' && kind === 'surface' ? `${orientation} ${face}` : `${shape} ${kind}`;
-
-const BY_PLACE: Readonly<Record<string, ChosenSolutions>> = CATALOGUE;
-
-/** Whether published solutions cover the situation. */
-export const isCovered = (situation: FlawSituation): boolean => placeOf(situation) in BY_PLACE;
-
-/** The solutions that govern by default: chosen by the body, the flaw and where it opens. */
-export function selectSolutions(situation: FlawSituation): ChosenSolutions {
-  const chosen = BY_PLACE[placeOf(situation)];
-  if (!chosen) throw new RangeError(`no solution for ${placeOf(situation)}`);
-  return chosen;
+/** Name of the situation in the catalogue. */
+function placeOf({ shape, kind, face, orientation, flawedSides }: FlawSituation): string {
+  if (shape === 'hole edge') return `${shape} ${kind} ${flawedSides}`;
+  if (shape !== 'cylinder' || kind === 'embedded') return `${shape} ${kind}`;
+  return kind === 'through-wall' ? `${orientation} ${kind}` : `${orientation} ${face} ${kind}`;
 }
+
+/** The solutions there are for a situation; undefined where the body cannot hold the flaw. */
+export const solutionsFor = (situation: FlawSituation): CatalogueEntry | undefined =>
+  (CATALOGUE as Readonly<Record<string, CatalogueEntry>>)[placeOf(situation)];
+
+/**
+ * The solutions that govern the situation, or those wished for; a wish for what the situation does not have
+ * changes nothing, its check comes before.
+ */
+export function selectSolutions(
+  situation: FlawSituation,
+  wish: SolutionWish = NO_WISH,
+): ChosenSolutions {
+  const entry = solutionsFor(situation);
+  if (!entry) throw new RangeError(`no solution for ${placeOf(situation)}`);
+  const plain = chosen(entry.stressIntensity, wish.stressIntensity);
+  const toe = AT_TOE.has(situation.kind) ? wish.attachmentLength : null;
+  return {
+    stressIntensity: toe === null ? plain : withWeldToe(plain, toe as Mm),
+    referenceStress: chosen(entry.referenceStress, wish.referenceStress),
+  };
+}
+
+const chosen = <T extends { readonly key: string }>(
+  [first, ...others]: readonly [T, ...T[]],
+  key: string | null,
+): T => others.find((each) => each.key === key) ?? first;

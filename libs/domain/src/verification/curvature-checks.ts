@@ -1,4 +1,4 @@
-import { CATALOGUE } from '../fracture/select-solutions';
+import { CATALOGUE, type CatalogueKey } from '../fracture/catalogue';
 import type { CheckRow } from './check-row';
 import { influenceOf } from './crack-of';
 import { FINITE_ELEMENT_ROWS } from './data/finite-element-rows';
@@ -9,6 +9,15 @@ const SOURCE = 'own finite elements, spectral elements with energy release rate'
 const TOLERANCE = 0.06;
 
 type Row = (typeof FINITE_ELEMENT_ROWS)[number];
+
+/** Where the solutions of the rows stand in the catalogue. */
+const PLACE: Readonly<Record<Row[0], CatalogueKey>> = {
+  'plate surface': 'plate surface',
+  'plate embedded': 'plate embedded',
+  'axial inside': 'axial inside surface',
+  'axial outside': 'axial outside surface',
+  'circumferential inside': 'circumferential inside surface',
+};
 
 const factor = ([solution, aspect, depth, angle]: Row): number => {
   const a = 1;
@@ -21,7 +30,7 @@ const factor = ([solution, aspect, depth, angle]: Row): number => {
     p: embedded ? t / 2 - a : 0,
     Ri: solution.startsWith('plate') ? Infinity : 10 * t,
   };
-  const { membrane } = influenceOf(CATALOGUE[solution].stressIntensity, symbols, angle);
+  const { membrane } = influenceOf(CATALOGUE[PLACE[solution]].stressIntensity[0], symbols, angle);
   return membrane / Math.sqrt(Math.PI * a);
 };
 

@@ -41,7 +41,7 @@ const plate = (toughness: number, residual: number): FlawCase => ({
   line: optionOneLine(STEEL),
   poissonsRatio: 0.3,
   toughness: toughness * Math.sqrt(1000),
-  attachmentLength: null,
+  wish: { stressIntensity: null, referenceStress: null, attachmentLength: null },
 });
 
 function limitingDepth(length: number, toughness: number, residual: number): number {

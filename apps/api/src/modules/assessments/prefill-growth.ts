@@ -1,6 +1,7 @@
 import type { CycleBlockInput, GrowthInput } from '@ligament/domain/assessment/assessment-input';
 import { daysBetween } from '@ligament/domain/scheduling/calendar-date';
 import type { Given } from '@ligament/domain/units/provenance';
+import { cornerOf } from './corner-of';
 import type { AssessmentBasis } from './assessment-basis.repository';
 
 const DAYS_PER_YEAR = 365.25;
@@ -28,16 +29,19 @@ function lawOf({
   return { key, title, source, stages, thresholdMPaSqrtMm: thresholdMpaSqrtMm };
 }
 
-function blocksOf({ cycles, loadCases, finding }: AssessmentBasis): CycleBlockInput[] {
+function blocksOf(basis: AssessmentBasis): CycleBlockInput[] {
+  const { cycles, loadCases, finding } = basis;
   return cycles.flatMap((cycle) => {
     const load = loadCases.find(({ id }) => id === cycle.loadCaseId);
     if (!load) return [];
     const hoop = finding.orientation === 'axial';
+    const corner = cornerOf(basis, load);
+    const membrane = corner?.membraneMPa ?? (hoop ? load.hoopMembraneMpa : load.axialMembraneMpa);
+    const bending = corner?.bendingMPa ?? (hoop ? load.hoopBendingMpa : load.axialBendingMpa);
     return [
       {
-        membraneRangeMPa:
-          Math.abs(hoop ? load.hoopMembraneMpa : load.axialMembraneMpa) * cycle.rangeFraction,
-        bendingRangeMPa: (hoop ? load.hoopBendingMpa : load.axialBendingMpa) * cycle.rangeFraction,
+        membraneRangeMPa: Math.abs(membrane) * cycle.rangeFraction,
+        bendingRangeMPa: bending * cycle.rangeFraction,
         cyclesPerYear: cycle.countPerYear,
         note: `${cycle.name}${cycle.source ? `, ${cycle.source}` : ''}`,
       },

@@ -11,6 +11,7 @@ import type { SizeQualifier } from '@ligament/domain/contract/vocabulary';
 import type { Origins } from '@ligament/domain/schema/materials';
 import type { Given } from '@ligament/domain/units/provenance';
 import type { AssessmentBasis } from './assessment-basis.repository';
+import { cornerOf } from './corner-of';
 import { prefillGrowth } from './prefill-growth';
 import { prefillResidual } from './prefill-residual';
 
@@ -118,7 +119,26 @@ function sizingOf(
   };
 }
 
+/** Stress normal to the flaw; at the corner of a nozzle that of the hole, concentration included. */
 function stressOf(basis: AssessmentBasis): StressInput {
+  const plain = shellStress(basis);
+  const corner = cornerOf(basis, basis.loadCase);
+  if (!corner) return plain;
+  const given = (value: number, part: string): Given => ({
+    value: rounded(value),
+    provenance: 'standard default',
+    note: `Load case ${basis.loadCase.name} at the hole of the nozzle (Kirsch 1898), peak ${rounded(corner.peakFactor)} times; ${part} over the wall of a straight line through half of it`,
+  });
+  return {
+    ...plain,
+    primaryMembraneMPa: given(corner.membraneMPa, 'mean'),
+    primaryBendingMPa: given(corner.bendingMPa, 'gradient'),
+  };
+}
+
+const rounded = (value: number): number => Math.round(value * 10) / 10;
+
+function shellStress(basis: AssessmentBasis): StressInput {
   const { finding, loadCase } = basis;
   const hoop = finding.orientation === 'axial';
   const membrane = hoop ? 'hoopMembraneMpa' : 'axialMembraneMpa';
