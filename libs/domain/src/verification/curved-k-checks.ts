@@ -78,7 +78,7 @@ const zahoorOnes: readonly Entry[] = [
   ],
 ];
 
-export const CURVED_K_CHECKS: readonly CheckRow[] = rowsOf(GROUP, 'KC', [
+export const CURVED_K_CHECKS: readonly CheckRow[] = rowsOf(GROUP, 'KV', [
   ...around('tension', circumferentialTension, [
     [0.05, 10, 1.05965173548],
     [0.1, 10, 1.16963915951],

@@ -142,7 +142,7 @@ const weighted: readonly Entry[] = [0.1, 0.3, 0.5, 0.7].flatMap((alpha) =>
   ]),
 );
 
-export const CURVED_K_ELEMENT_CHECKS: readonly CheckRow[] = rowsOf(GROUP, 'FC', [
+export const CURVED_K_ELEMENT_CHECKS: readonly CheckRow[] = rowsOf(GROUP, 'FV', [
   ...long,
   ...pressure,
   ...deepest,

@@ -1,7 +1,7 @@
 import type { Crack } from '../../geometry/crack';
-import { checkLimit } from '../../geometry/limit';
 import { refused, type Refusal, type Refused } from '../../geometry/refusal';
 import type { Degrees, MPaSqrtMm } from '../../units/quantity';
+import { brokenLimits } from '../stress-intensity/broken-limits';
 import type { Influence, StressIntensitySolution } from '../stress-intensity/solution';
 import { deepestCoefficient, faceCoefficient } from './universal-factors';
 import { faceKOfStress, tipKOfStress, type WallStressAt } from './weighted-stress';
@@ -25,7 +25,7 @@ export function surfaceKOfStress(
   crack: Crack,
   stress: WallStressAt,
 ): KOfStress | Refused {
-  const outside = brokenLimits(solution, crack);
+  const outside = refusalsOf(solution, crack);
   if (outside.length > 0) return refused(...outside);
   const [deep0, deep1] = factorsAt(solution, crack, 90);
   const deepest = tipKOfStress(
@@ -73,20 +73,10 @@ const NO_STRESS: Refusal = {
 };
 
 /** The front a weight function is known for, and the limits of the solution. */
-function brokenLimits(solution: StressIntensitySolution, crack: Crack): readonly Refusal[] {
+function refusalsOf(solution: StressIntensitySolution, crack: Crack): readonly Refusal[] {
   if (solution.front === 'through' || crack.ligament > 0) return [NO_SURFACE];
   if (!(crack.a > 0 && crack.thickness > 0)) return [NO_SIZE(crack.a)];
-  return solution.limits.flatMap((limit) => {
-    const { value, met } = checkLimit(limit, crack);
-    if (met) return [];
-    return {
-      input: limit.input,
-      limit: limit.text,
-      value: Number.isFinite(value) ? value : String(value),
-      message: `${limit.name} is ${String(value)}; the solution holds for ${limit.text}.`,
-      instead: limit.instead,
-    };
-  });
+  return brokenLimits(solution.limits, crack);
 }
 
 const NO_SURFACE: Refusal = {
