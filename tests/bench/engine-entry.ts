@@ -10,3 +10,4 @@ export {
   TWO_STAGES,
 } from '@ligament/domain/assessment/fast-life/testing/random-flaws';
 export { readableLife } from '@ligament/domain/assessment/fast-life/testing/readable-life';
+export { stressMap } from '@ligament/domain/fracture/tip-field/stress-map';

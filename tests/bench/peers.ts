@@ -38,8 +38,8 @@ export function writeFlaws(folder: string, flaws: readonly Flaw[]): void {
   writeFileSync(join(folder, 'flaws.bin'), Buffer.from(numbers.buffer));
 }
 
-/** The C program, compiled here for this processor; a word why not otherwise. */
-export function cPeer(folder: string): Peer | string {
+/** The C program with a number of steps, compiled here for this processor; a word why not otherwise. */
+export function cPeer(folder: string, steps: number): Peer | string {
   const program = join(folder, 'textbook-life');
   const source = join(HERE, 'textbook-life.c');
   try {
@@ -47,7 +47,7 @@ export function cPeer(folder: string): Peer | string {
   } catch {
     return 'no gcc';
   }
-  return peer('C', folder, program, (count) => [String(count), '1', '10']);
+  return peer(`C ${steps} steps`, folder, program, (count) => [String(count), '1', String(steps)]);
 }
 
 /** NumPy over all flaws, or SciPy flaw by flaw; a word why not otherwise. */
@@ -69,7 +69,7 @@ function peer(
   settings: (count: number) => string[],
   before: string[] = [],
 ): Peer {
-  const target = join(folder, `cycles-${name}.bin`);
+  const target = join(folder, `cycles-${name.replaceAll(' ', '-')}.bin`);
   const run = (count: number): PeerRun => {
     const given = [...before, join(folder, 'flaws.bin'), target, ...settings(count)];
     const said = execFileSync(program, given, {

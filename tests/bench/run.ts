@@ -6,6 +6,7 @@ import { assessmentBench } from './assessment-bench';
 import { benchBundle, engineBundle } from './bundle-engine';
 import type * as Engine from './engine-entry';
 import { livesBench } from './lives-bench';
+import { mapBench } from './map-bench';
 
 /** Largest engine a browser should have to load [kB, gzipped]. */
 const BUNDLE_AIM_KB = 60;
@@ -27,6 +28,8 @@ try {
   livesBench(engine, folder, say);
   say('\nOne assessment');
   assessmentBench(engine, say);
+  say('\nStress map around a crack');
+  mapBench(engine, say);
   say('\nThe engine in a browser');
   const { bytes, gzipped } = await engineBundle();
   const met = gzipped / 1000 <= BUNDLE_AIM_KB ? 'met' : 'NOT met';

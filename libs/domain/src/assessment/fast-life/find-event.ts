@@ -64,13 +64,12 @@ function passedBySizeAlone(l: number): boolean {
 
 /** Where size alone decides, the curve is enough and nothing is evaluated. */
 function bySize(l: number): number {
-  let x = 1;
+  let x = chord();
   for (let i = 0; i < MOST_TRIALS; i++) {
-    x = chord();
     place(l, x);
     const room = sizeRoom(l);
-    narrow(x, room);
     if (Math.abs(room) < ENOUGH) break;
+    x = nearer(x, room);
   }
   eventFound = nearestEvent(BRANCH);
   return x;
@@ -84,9 +83,7 @@ function byTrials(l: number, accuracy: LifeAccuracy): number {
     evaluate(l, l + 1, SPARE);
     evaluations[l] = (evaluations[l] as number) + 1;
     const room = roomLeft(l);
-    const curved = parabola(x, room);
-    narrow(x, room);
-    const next = curved >= low && curved <= high ? curved : chord();
+    const next = nearer(x, room);
     const left = (stepLength[l] as number) * Math.abs(next - x);
     x = next;
     if (left < accuracy.event || high - low < ENOUGH) break;
@@ -103,6 +100,13 @@ const parabola = (x: number, room: number) =>
   (low * room * highRoom) / ((lowRoom - room) * (lowRoom - highRoom)) +
   (x * lowRoom * highRoom) / ((room - lowRoom) * (room - highRoom)) +
   (high * lowRoom * room) / ((highRoom - lowRoom) * (highRoom - room));
+
+/** A better place than the trial, which becomes a side of the bracket. */
+function nearer(x: number, room: number): number {
+  const curved = parabola(x, room);
+  narrow(x, room);
+  return curved >= low && curved <= high ? curved : chord();
+}
 
 function narrow(x: number, room: number): void {
   if (room > 0) {
