@@ -81,7 +81,7 @@ export const CYLINDER_AXIAL_THROUGH_WALL_K: StressIntensitySolution = {
   title: 'Axial crack through the wall of a cylinder',
   source: ZAHOOR,
   formula: 'K = (σm + |σb|) √(πc) √(1 + 0.52x + 1.29x² − 0.074x³), x = c/√(Rt)',
-  accuracy: `Within 8 % of the other published bulging factors to x = 2. ${UPPER}`,
+  accuracy: `The other published bulging factors lie from 10 % below to 6 % above it to x = 2. ${UPPER}`,
   limits: [shellLengthLimit(5, ZAHOOR), meanRadiusLimit(5, Infinity, 'common practice')],
   front: 'through',
   influence: cylinderAxialThroughInfluence,

@@ -72,7 +72,7 @@ const longSolution = (
   formula:
     'K = √(πa) Σ σn (a/t)ⁿ Gn, Gn of an edge crack in a strip held by the wall, times 1 + Σ cij uⁱ (a/t)ʲ, u = t/(Ri + 2t)',
   accuracy:
-    'Within 0.2 % of 22 finite-element results for each coefficient; a radius left out of the fit is met within 0.4 %.',
+    'Within 0.2 % of 22 finite-element results for each coefficient; a radius of Ri/t ≥ 5 left out of the fit is met within 0.5 %.',
   limits: LIMITS,
   front: 'straight',
   influence: (crack, angle, into) => cylinderLongInfluence(crack, angle, into, way, fit),

@@ -8,7 +8,7 @@ import type { FaceDegree } from './strip-coefficient';
  * own hoop force keeps the cut from shifting.
  * @param ratio inside radius over thickness, Ri/t [-]
  * @returns L/t for `heldStripFactor` [-]
- * @validity thin ring; with it the held strip is within 0.3 % of long axial cracks at Ri/t = 100, 6 % at 5
+ * @validity thin ring; with it the held strip is within 0.4 % of long axial cracks at Ri/t = 100, 6 % at 5
  * @source bending of a thin circular ring (Castigliano)
  * @example ringRestraint(10) // 21.99114858
  */
@@ -27,7 +27,7 @@ export type LongWay = 'axial' | 'circumferential';
  * @param fit coefficients of the correction [-]
  * @returns factor H = (a/t)ⁿ Gn [-]
  * @validity Ri/t ≥ 1, a/t ≤ 0.8
- * @source own fit of finite-element results, within 0.2 %; left out of the fit, a radius is met within 0.4 %
+ * @source own fit of finite-element results, within 0.2 %; left out of the fit, a radius of Ri/t ≥ 5 is met within 0.5 %
  * @example longCrackFactor(0, crackOf({ a: 4, c: 1, t: 10 }), 'axial', []) // 2.111705781
  */
 export function longCrackFactor(
