@@ -2,14 +2,14 @@ import type { Deps } from '../apps/api/src/deps';
 import { siteDay } from '../apps/api/src/http/site-day';
 import { addInspection } from '../apps/api/src/modules/inspections/record-inspection';
 import { addReinspection } from '../apps/api/src/modules/reinspections/add-reinspection';
-import { ASSESSMENTS, REFERRED, BY_RULE } from './plant/assessments';
+import { ASSESSMENTS, REFERRED } from './plant/assessments';
 import { INSPECTIONS, type DemoInspection } from './plant/inspections';
 import { SITE } from './plant/site';
 import { assessAsTold } from './replay/assess-flaw-as-told';
 import { buildRegister, type BuiltRegister } from './replay/build-register';
 import { dateMover } from './replay/dates';
 import { holdInspection, inspectionFields } from './replay/hold-inspection';
-import { enterWindows, planWork, referAndSetByRule } from './replay/plan-work';
+import { enterWindows, planWork, referOutOfScope } from './replay/plan-work';
 import { play, type Flow } from './replay/play';
 import { openStage, type Stage } from './replay/stage';
 
@@ -31,7 +31,7 @@ export async function seedDemo(deps: Deps): Promise<void> {
   );
   stage.goTo(dates.after('2026-12-01', 0));
   const windows = await enterWindows(stage, register);
-  await referAndSetByRule(stage, flaws);
+  await referOutOfScope(stage, flaws);
   await addNextWork(stage, register);
   await planWork(stage, flaws, windows);
 }
@@ -56,8 +56,7 @@ async function* playInspection(
   }
 }
 
-const isOutside = (flaw: string): boolean =>
-  [...REFERRED, ...BY_RULE].some((each) => each.flaw === flaw);
+const isOutside = (flaw: string): boolean => REFERRED.some((each) => each.flaw === flaw);
 
 /** What is under way on the last day: a re-inspection without a flaw, a planned inspection, and a report waiting for its file. */
 async function addNextWork(stage: Stage, { components }: BuiltRegister): Promise<void> {

@@ -118,25 +118,6 @@ export const ASSESSMENTS: readonly DemoAssessment[] = [
   },
 ];
 
-/** Flaws for which this version has no solution: their dates come from a site rule. */
-export const BY_RULE: readonly {
-  readonly flaw: string;
-  readonly dueOn: string;
-  readonly basis: string;
-}[] = [
-  {
-    flaw: 'R-403-F01',
-    dueOn: '2028-11-11',
-    basis:
-      'Site maximum of 24 months for growing fatigue; corner flaw at a nozzle, assessed by specialist report SR-403',
-  },
-  {
-    flaw: 'F-503-F01',
-    dueOn: '2027-10-07',
-    basis: 'Site maximum of 24 months; corner flaw at a hole, assessed by specialist report SR-503',
-  },
-];
-
 /** Findings outside what a crack-like assessment covers, and whom they were referred to. */
 export const REFERRED: readonly { readonly flaw: string; readonly reason: string }[] = [
   {

@@ -7,9 +7,8 @@ import { and, eq, notInArray } from 'drizzle-orm';
 import { changeFlaw } from '../../apps/api/src/modules/flaws/change-flaw';
 import { readFlawView } from '../../apps/api/src/modules/flaws/flaw-view';
 import { writeHistory } from '../../apps/api/src/modules/history/write-history';
-import { addReinspection } from '../../apps/api/src/modules/reinspections/add-reinspection';
 import { planReinspection } from '../../apps/api/src/modules/reinspections/plan-reinspection';
-import { BY_RULE, PLANS, REFERRED } from '../plant/assessments';
+import { PLANS, REFERRED } from '../plant/assessments';
 import { WINDOWS } from '../plant/site';
 import type { BuiltRegister } from './build-register';
 import type { Stage } from './stage';
@@ -52,26 +51,14 @@ export async function enterWindows(
   return ids;
 }
 
-/** Refers what is out of scope, and sets the dates that come from a rule instead of an assessment. */
-export async function referAndSetByRule(
-  { deps, siteId, actor, dates }: Stage,
+/** Refers what is out of scope of a crack-like assessment. */
+export async function referOutOfScope(
+  { deps, siteId, actor }: Stage,
   flaws: ReadonlyMap<string, string>,
 ): Promise<void> {
   for (const { flaw, reason } of REFERRED) {
     const view = await readFlawView(deps.db, deps.clock, siteId, flaws.get(flaw) ?? '');
     await changeFlaw(deps, actor('tomas'), view.id, view.version, { state: 'referred', reason });
-  }
-  for (const { flaw, dueOn, basis } of BY_RULE) {
-    const view = await readFlawView(deps.db, deps.clock, siteId, flaws.get(flaw) ?? '');
-    await addReinspection(deps, actor('tomas'), {
-      componentId: view.componentId,
-      flawId: view.id,
-      task: `PAUT of flaw ${view.number}`,
-      technique: 'PAUT',
-      dueOn: dates.move(dueOn),
-      basis,
-      reason: basis,
-    });
   }
 }
 

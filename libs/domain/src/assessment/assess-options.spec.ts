@@ -138,3 +138,29 @@ describe('a body that cannot hold the flaw', () => {
     });
   });
 });
+
+describe('the peak stress of a nozzle corner', () => {
+  const corner: AssessmentInput = {
+    ...plain,
+    wall: { shape: 'nozzle corner', thicknessMm: given(28), holeRadiusMm: given(100) },
+    flaw: { ...plain.flaw, kind: 'corner', heightMm: given(4), lengthMm: given(4) },
+  };
+  const peak = (value: readonly number[]): AssessmentInput => ({
+    ...corner,
+    stress: { ...corner.stress, peakProfileMPa: { value, ...note } },
+  });
+
+  it('drives K and leaves collapse alone', () => {
+    const [with2, without] = [assessed(peak([300, -100])), assessed(corner)];
+    expect(with2.kPrimaryMPaSqrtM).toBeGreaterThan(1.5 * without.kPrimaryMPaSqrtM);
+    expect(with2.lr).toBe(without.lr);
+  });
+
+  it('is refused where the solution holds the concentration already', () => {
+    const stress = { ...plain.stress, peakProfileMPa: { value: [300], ...note } };
+    expect(assessFlaw({ ...plain, stress })).toMatchObject({
+      status: 'refused',
+      refusals: [{ input: 'stress.peakProfileMPa' }],
+    });
+  });
+});

@@ -78,6 +78,11 @@ export interface StressInput {
    * [MPa]. Where it is given, membrane and bending are its linear part and the two inputs above are ignored.
    */
   readonly primaryProfileMPa?: Given<readonly number[]> | null;
+  /**
+   * Stress across the corner of a nozzle, concentration included, as a polynomial in x/t [MPa]: K is taken
+   * from it, collapse from membrane and bending, as a peak yields without collapse.
+   */
+  readonly peakProfileMPa?: Given<readonly number[]> | null;
   /** Weld whose toe the flaw starts from: length of the attachment along the stress [mm]. */
   readonly weldToe?: { readonly attachmentLengthMm: Given } | null;
   /** Offset of the two walls at a butt weld; it adds bending to the primary membrane stress [mm]. */

@@ -48,6 +48,17 @@ const chosenSolutionExists: Rule = (input) => {
   return null;
 };
 
+const peakAtNozzle: Rule = ({ stress, wall }) => {
+  if (!stress.peakProfileMPa || wall.shape === 'nozzle corner') return null;
+  return {
+    input: 'stress.peakProfileMPa',
+    limit: 'the corner of a nozzle',
+    value: wall.shape,
+    message: `A peak stress is given for a ${wall.shape}: its solutions hold the concentration already, or have none.`,
+    instead: 'Give the stress through the wall as the primary stress.',
+  };
+};
+
 const heightLeavesWall: Rule = ({ wall, flaw, sizing }) => {
   if (!hasHeight(flaw.kind)) return null;
   const t = wall.thicknessMm.value;
@@ -133,6 +144,7 @@ const somePrimaryStress: Rule = ({ stress, wall }) => {
 const RULES: readonly Rule[] = [
   kindFitsWall,
   chosenSolutionExists,
+  peakAtNozzle,
   heightLeavesWall,
   ligamentFits,
   lengthNotBelowHeight,

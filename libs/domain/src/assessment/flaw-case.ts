@@ -33,6 +33,8 @@ export interface FlawCase {
   readonly wall: Wall;
   /** Primary stress at service load, from the face the flaw is measured from [MPa]. */
   readonly primary: StressTerms;
+  /** The part of it that leads to collapse: without the peak of a nozzle [MPa]. */
+  readonly collapse: StressTerms;
   readonly facePressure: number;
   readonly residual: ResidualStressInput;
   readonly material: DiagramMaterial;
@@ -73,7 +75,13 @@ export function flawCase(input: AssessmentInput, line: DiagramLine): FlawCase {
   return {
     situation: situationOf(input),
     wall: wallOf(wall, flaw.orientation),
-    primary: scaled(primaryTerms(stress, wall.thicknessMm.value), factors.stress),
+    primary: scaled(
+      stress.peakProfileMPa
+        ? termsOf(stress.peakProfileMPa.value)
+        : primaryTerms(stress, wall.thicknessMm.value),
+      factors.stress,
+    ),
+    collapse: scaled(primaryTerms(stress, wall.thicknessMm.value), factors.stress),
     facePressure: factors.stress * (stress.crackFacePressureMPa?.value ?? 0),
     residual: stress.residual,
     material: diagramMaterial(input),

@@ -94,6 +94,7 @@ const OF_SHAPE: Readonly<Record<WallShape, readonly Row[]>> = {
 /** Inputs that may be left out altogether. */
 const OPTIONAL: readonly Row[] = [
   ['stress.primaryProfileMPa.value.*', 'Primary stress polynomial', 'MPa', -5000, 5000, STRESS],
+  ['stress.peakProfileMPa.value.*', 'Stress across the corner', 'MPa', -5000, 5000, STRESS],
   ['stress.residual.profileMPa.value.*', 'Residual stress polynomial', 'MPa', -5000, 5000, STRESS],
   ['stress.weldToe.attachmentLengthMm', 'Length of the attachment', 'mm', 1, 1000, LENGTH],
   ['stress.offsetMm', 'Offset of the walls', 'mm', -100, 100, LENGTH],

@@ -72,7 +72,7 @@ export class SectionEvaluator {
   private readonly termwise: boolean;
   /** A stress with a curve, and a solution that does not. */
   private readonly bounded: boolean;
-  private readonly linearPrimary: StressTerms;
+  private readonly linearCollapse: StressTerms;
   private readonly fixed: StressTerms;
   private primary: StressTerms;
   private residual: StressTerms;
@@ -90,7 +90,7 @@ export class SectionEvaluator {
     this.fixed = fixedResidual(flaw);
     this.residual = this.fixed;
     this.primary = flaw.primary;
-    this.linearPrimary = linearised(flaw.primary);
+    this.linearCollapse = linearised(flaw.collapse);
     const curved = isCurved(flaw.primary) || isCurved(this.fixed);
     this.termwise = curved && stressIntensity.higher !== null;
     this.bounded = curved && stressIntensity.higher === null;
@@ -101,7 +101,7 @@ export class SectionEvaluator {
     for (let i = 0; i < this.places.length; i++) this.fill(crack, i);
     if (this.bounded) this.boundStresses(crack);
     // pressure in a fully long crack adds p a/t to the force through the wall (equilibrium)
-    const { membrane, bending } = this.linearPrimary;
+    const { membrane, bending } = this.linearCollapse;
     const force = membrane + this.facePressure * Math.min(crack.a / crack.thickness, 1);
     this.reference = this.solutions.referenceStress.stress(crack, force as MPa, bending as MPa);
   }

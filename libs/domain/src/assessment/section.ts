@@ -123,6 +123,7 @@ function pressureOnFaces(flaw: FlawCase, kind: Section['kind'], face: Section['f
 const turnedOver = (flaw: FlawCase): FlawCase => ({
   ...flaw,
   primary: fromOtherFace(flaw.primary),
+  collapse: fromOtherFace(flaw.collapse),
   residual: turnedResidual(flaw.residual),
 });
 

@@ -134,6 +134,7 @@ export const assessmentInput = z.strictObject({
     residual,
     crackFacePressureMPa: given(between(0, 500, 'MPa')).nullable(),
     primaryProfileMPa: profile.nullish(),
+    peakProfileMPa: profile.nullish(),
     weldToe: z.strictObject({ attachmentLengthMm: length(5000) }).nullish(),
     offsetMm: given(between(-1000, 1000, 'mm')).nullish(),
   }),

@@ -35,6 +35,7 @@ const plate = (toughness: number, residual: number): FlawCase => ({
   },
   wall: { thickness: mm(25), width: mm(500), insideRadius: mm(Infinity), holeRadius: mm(0) },
   primary: linearTerms(200, 0),
+  collapse: linearTerms(200, 0),
   facePressure: 0,
   residual: { state: 'entered', membraneMPa: given(residual), bendingMPa: given(0) },
   material: STEEL,

@@ -11,7 +11,7 @@ import type { SizeQualifier } from '@ligament/domain/contract/vocabulary';
 import type { Origins } from '@ligament/domain/schema/materials';
 import type { Given } from '@ligament/domain/units/provenance';
 import type { AssessmentBasis } from './assessment-basis.repository';
-import { cornerOf } from './corner-of';
+import { cornerOf, startsFromCorner } from './corner-of';
 import { prefillGrowth } from './prefill-growth';
 import { prefillResidual } from './prefill-residual';
 
@@ -65,7 +65,7 @@ function cornerWall({ location }: AssessmentBasis, thicknessMm: Given, drawing: 
     provenance: 'certificate',
     note: `${location.name}: ${drawing}`,
   };
-  return location.kind === 'nozzle weld'
+  return startsFromCorner(location, thicknessMm.value)
     ? { shape: 'nozzle corner', thicknessMm, holeRadiusMm }
     : { shape: 'hole edge', thicknessMm, holeRadiusMm, widthMm: null, flawedSides: 'one' };
 }
@@ -124,15 +124,13 @@ function stressOf(basis: AssessmentBasis): StressInput {
   const plain = shellStress(basis);
   const corner = cornerOf(basis, basis.loadCase);
   if (!corner) return plain;
-  const given = (value: number, part: string): Given => ({
-    value: rounded(value),
-    provenance: 'standard default',
-    note: `Load case ${basis.loadCase.name} at the hole of the nozzle (Kirsch 1898), peak ${rounded(corner.peakFactor)} times; ${part} over the wall of a straight line through half of it`,
-  });
   return {
     ...plain,
-    primaryMembraneMPa: given(corner.membraneMPa, 'mean'),
-    primaryBendingMPa: given(corner.bendingMPa, 'gradient'),
+    peakProfileMPa: {
+      value: [corner.membraneMPa + corner.bendingMPa, -2 * corner.bendingMPa].map(rounded),
+      provenance: 'standard default',
+      note: `Load case ${basis.loadCase.name} at the edge of the hole (Kirsch 1898), peak ${rounded(corner.peakFactor)} times; a straight line through half of the wall`,
+    },
   };
 }
 

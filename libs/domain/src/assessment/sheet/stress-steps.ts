@@ -70,7 +70,7 @@ function referenceSteps(subject: SheetSubject): CalculationStep[] {
       unit: 'MPa',
       formula: referenceStress.formula,
       source: referenceStress.source,
-      inputs: [...loads(subject), ...sizes(subject)],
+      inputs: [...loadTexts(subject.section.flaw.collapse), ...sizes(subject)],
     },
     {
       group: 'Reference stress',

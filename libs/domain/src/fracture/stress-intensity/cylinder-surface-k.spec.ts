@@ -75,10 +75,11 @@ describe('surface flaws in a cylinder', () => {
 
   it('gives bending within 8 % of the tension value of the finite elements', () => {
     for (const [solution, aspect, depth, angle, membrane, bending] of FINITE_ELEMENT_ROWS) {
-      if (solution.startsWith('plate') || angle < 30) continue;
+      if (solution === 'plate surface' || solution === 'plate embedded' || angle < 30) continue;
       const crack = { a: 1, c: 1 / aspect, t: 1 / depth, Ri: 10 / depth };
-      const { bending: own } = influenceOf(CATALOGUE[`${solution} surface`].stressIntensity[0], crack, angle);
-      expect(Math.abs(own / Math.sqrt(Math.PI) - bending)).toBeLessThan(0.08 * membrane);
+      const [own] = CATALOGUE[`${solution} surface`].stressIntensity;
+      const { bending: found } = influenceOf(own, crack, angle);
+      expect(Math.abs(found / Math.sqrt(Math.PI) - bending)).toBeLessThan(0.08 * membrane);
     }
   });
 

@@ -73,6 +73,15 @@ export function inputGroups(input: AssessmentInput): readonly InputGroup[] {
         ...(input.stress.primaryProfileMPa
           ? []
           : [given('stress.primaryMembraneMPa'), given('stress.primaryBendingMPa')]),
+        ...(input.wall.shape === 'nozzle corner'
+          ? [
+              {
+                kind: 'profile' as const,
+                path: 'stress.peakProfileMPa',
+                label: 'Stress across the corner, concentration included',
+              },
+            ]
+          : []),
         {
           kind: 'profile',
           path: 'stress.primaryProfileMPa',
