@@ -6,13 +6,15 @@ import { inputName } from '../../shared/assessed/input-names';
 import { choose, emptyProfile, given, include, setAt, valueAt } from './edit-input';
 import { GivenField } from './given-field';
 import { GrowthFields } from './growth-fields';
+import { FactorFields } from './factor-fields';
+import { SolutionChoice } from './solution-choice';
 import { ProfileField } from './profile-field';
 import { type InputField, inputGroups, type Option } from './input-groups';
 
 /** Every input of an assessment, in groups, each with its origin; to edit or to read. */
 @Component({
   selector: 'app-inputs-panel',
-  imports: [GivenField, GrowthFields, ProfileField],
+  imports: [GivenField, GrowthFields, ProfileField, SolutionChoice, FactorFields],
   templateUrl: './inputs-panel.html',
   styleUrl: './inputs-panel.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
