@@ -9,7 +9,7 @@ import * as curvatureTables from '@ligament/domain/fracture/stress-intensity/cur
 const DOMAIN = resolve(import.meta.dirname, '../../libs/domain/src');
 
 /** Rooms and files whose exported functions are formulas: their comment is a data sheet. */
-const FORMULA_FILES = ['fracture', 'geometry', 'growth', 'materials']
+const FORMULA_FILES = ['fracture', 'geometry', 'growth', 'materials', 'numerics', 'probability']
   .flatMap((room) => sourcesIn(join(DOMAIN, room)))
   .filter((file) => /@source/.test(readFileSync(file, 'utf8')));
 
