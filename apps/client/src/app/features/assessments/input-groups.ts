@@ -36,7 +36,7 @@ const SHAPES: readonly Option[] = [
   { value: 'sphere', words: 'sphere' },
   { value: 'plate', words: 'plate (flat wall, or head)' },
   { value: 'hole edge', words: 'edge of a hole' },
-  { value: 'nozzle corner', words: 'inner corner of a nozzle' },
+  { value: 'nozzle corner', words: 'corner of a nozzle or of a narrow hole' },
   { value: 'round bar', words: 'round bar' },
 ];
 const SIDES: readonly Option[] = [

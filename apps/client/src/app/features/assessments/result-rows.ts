@@ -33,10 +33,12 @@ export function resultRows(outcome: AssessedFlaw): readonly ResultRow[] {
     row('Reference stress', outcome.referenceStressMPa, 'MPa', outcome.solution.referenceStress, 1),
     row('Residual membrane', outcome.residualMembraneMPa, 'MPa', 'after relaxation', 1),
     row('Residual bending', outcome.residualBendingMPa, 'MPa', '', 1),
-    row('Assessed a', outcome.assessed.aMm, 'mm', 'measured and allowance', 2),
-    row('Assessed 2c', 2 * outcome.assessed.cMm, 'mm', 'measured and allowance', 2),
+    row('Assessed height', outcome.assessed.heightMm, 'mm', 'measured and allowance', 2),
+    row('Assessed c', outcome.assessed.cMm, 'mm', 'measured and allowance', 2),
     row('Ligament', outcome.assessed.ligamentMm, 'mm', 'sound metal left', 2),
-    row('Limiting height', outcome.limitingHeightMm, 'mm', outcome.limitingBecause, 2),
+    typeof outcome.limitingLengthMm === 'number'
+      ? row('Limiting length', outcome.limitingLengthMm, 'mm', outcome.limitingBecause, 2)
+      : row('Limiting height', outcome.limitingHeightMm, 'mm', outcome.limitingBecause, 2),
     row('Remaining life', outcome.life.years, 'years', outcome.life.because, 2),
     row('Remaining life', outcome.life.cycles, 'cycles', 'all blocks together', 0),
   ];

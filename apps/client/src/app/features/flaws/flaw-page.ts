@@ -89,7 +89,8 @@ export class FlawPage {
   }
 
   protected title({ number, kind, face, location }: FlawView): string {
-    const where = kind === 'surface' ? `${face} surface` : 'embedded';
+    const opens = kind === 'surface' || kind === 'extended surface' || kind === 'corner';
+    const where = opens ? `${face} ${kind}` : kind;
     return `${number}, ${where} at ${location.name}`;
   }
 

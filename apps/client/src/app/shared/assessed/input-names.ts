@@ -22,6 +22,7 @@ const NAMES: Readonly<Record<string, readonly [name: string, unit: string]>> = {
   'stress.residual.membraneMPa': ['Residual membrane stress', 'MPa'],
   'stress.residual.bendingMPa': ['Residual bending stress', 'MPa'],
   'stress.residual.profileMPa': ['Residual stress polynomial', 'MPa'],
+  'stress.peakProfileMPa': ['Stress across the corner', 'MPa'],
   'stress.primaryProfileMPa': ['Primary stress polynomial', 'MPa'],
   'stress.weldToe.attachmentLengthMm': ['Length of the attachment along the stress', 'mm'],
   'stress.offsetMm': ['Offset of the walls', 'mm'],

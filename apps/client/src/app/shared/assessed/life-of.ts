@@ -1,9 +1,10 @@
-import type { GrowthEvent } from '@ligament/domain/assessment/assessment-outcome';
+import type { GrowthEvent, GrowthState } from '@ligament/domain/assessment/assessment-outcome';
 import { yearsAfter } from '@ligament/domain/scheduling/calendar-date';
 import type { TwinTable } from '../drawing/twin-table';
 import type { LifeDrawing, MeasuredSize, NamedSpan } from '../drawings/life-drawing';
 import { dayText } from '../format/day-text';
 import type { AssessedCase } from './assessed-case';
+import { assessedSize } from './size-words';
 import { atLimit, limitWord } from './milestones';
 
 /** What surrounds an assessed flaw in time. */
@@ -19,15 +20,19 @@ export interface LifeSurroundings {
 export function lifeOf(each: AssessedCase, around: LifeSurroundings): LifeDrawing {
   const { input, outcome, inspectedOn, dueOn } = each;
   const end = atLimit(each);
+  const size = assessedSize(each);
+  const extent = ({ heightMm, lengthMm }: GrowthState) => (size.byHeight ? heightMm : lengthMm);
+  const limiting = size.byHeight ? outcome.limitingHeightMm : (outcome.limitingLengthMm ?? null);
   return {
     wallMm: input.wall.thicknessMm.value,
-    quantity: input.flaw.kind === 'surface' ? 'depth' : 'height',
-    measured: around.measured,
-    predicted: outcome.path.map(({ years, heightMm }) => ({
-      on: yearsAfter(inspectedOn, years),
-      heightMm,
+    quantity: size.byHeight ? size.heightWord : 'length',
+    // findings are kept by their height: what only grows in length has none to show
+    measured: size.byHeight ? around.measured : [],
+    predicted: outcome.path.map((state) => ({
+      on: yearsAfter(inspectedOn, state.years),
+      heightMm: extent(state),
     })),
-    limitMm: end?.state.heightMm ?? outcome.limitingHeightMm,
+    limitMm: end ? extent(end.state) : limiting,
     limit: end ? { on: end.on, label: `${limitWord(outcome.life.end)}, ${dayText(end.on)}` } : null,
     due: dueOn ? { on: dueOn, label: `inspect by ${dayText(dueOn)}`, basis: around.basis } : null,
     windows: around.windows,
@@ -42,13 +47,15 @@ export function lifeOf(each: AssessedCase, around: LifeSurroundings): LifeDrawin
 const eventWords = ({ to }: GrowthEvent) =>
   to === 'through-wall' ? 'through the wall' : 'breaks the surface';
 
+const QUANTITY = { depth: 'Depth', height: 'Height', length: 'Length' } as const;
+
 /** The life line as numbers. */
 export function lifeTable(drawing: LifeDrawing): TwinTable {
   return {
     columns: [
       { label: 'Day' },
       { label: 'What' },
-      { label: drawing.quantity === 'depth' ? 'Depth' : 'Height', unit: 'mm' },
+      { label: QUANTITY[drawing.quantity], unit: 'mm' },
       { label: 'Sizing error', unit: '± mm' },
     ],
     rows: [

@@ -25,8 +25,8 @@ export interface NamedSpan {
 /** What a life line draws: sizes measured, growth predicted, its limit, and the days that matter. */
 export interface LifeDrawing {
   readonly wallMm: number;
-  /** What is measured: depth of a surface flaw, height of an embedded one. */
-  readonly quantity: 'depth' | 'height';
+  /** What is drawn: depth of a flaw that opens to a face, height of an embedded one, length of one through the wall. */
+  readonly quantity: 'depth' | 'height' | 'length';
   readonly measured: readonly MeasuredSize[];
   readonly predicted: readonly DatedHeight[];
   readonly limitMm: number | null;

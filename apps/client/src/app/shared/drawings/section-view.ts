@@ -4,6 +4,8 @@ import { type Dimension, sectionGeometry } from './section-geometry';
 import type { SectionDrawing } from './section-drawing';
 
 let views = 0;
+/** Half of the room the ligament's label takes on its line. */
+const BOX_HALF = 62;
 
 /** The wall drawn to scale with the flaw in it: now, at the next inspection, and at its limit. */
 @Component({
@@ -31,6 +33,6 @@ export class SectionView {
   /** The ligament's label stands on its line where it fits, else beside it. */
   protected readonly boxed = computed(() => {
     const { ligament } = this.shape();
-    return ligament !== null && Math.abs(ligament.y2 - ligament.y1) >= 44;
+    return ligament !== null && ligament.x1 > BOX_HALF && Math.abs(ligament.y2 - ligament.y1) >= 44;
   });
 }

@@ -42,7 +42,7 @@ export function locusChart({ points, assessed, measured }: FlawLocus): EChartsCo
         symbolSize: 10,
         data: [[assessed.lengthMm, assessed.heightMm]],
         itemStyle: { color: 'var(--ink)' },
-        label: { show: true, position: 'right', formatter: 'assessed', color: 'var(--ink)' },
+        label: { show: true, position: 'bottom', formatter: 'assessed', color: 'var(--ink)' },
       },
       {
         type: 'scatter',
