@@ -9,12 +9,14 @@ import { GrowthFields } from './growth-fields';
 import { FactorFields } from './factor-fields';
 import { SolutionChoice } from './solution-choice';
 import { ProfileField } from './profile-field';
+import { TOUGHNESS_PATH, toughnessKnown } from './toughness-known';
+import { ToughnessButton } from './toughness-button';
 import { type InputField, inputGroups, type Option } from './input-groups';
 
 /** Every input of an assessment, in groups, each with its origin; to edit or to read. */
 @Component({
   selector: 'app-inputs-panel',
-  imports: [GivenField, GrowthFields, ProfileField, SolutionChoice, FactorFields],
+  imports: [GivenField, GrowthFields, ProfileField, SolutionChoice, FactorFields, ToughnessButton],
   templateUrl: './inputs-panel.html',
   styleUrl: './inputs-panel.scss',
   changeDetection: ChangeDetectionStrategy.OnPush,
@@ -29,6 +31,8 @@ export class InputsPanel {
   readonly changed = output<AssessmentInput>();
 
   protected readonly groups = computed(() => inputGroups(this.input()));
+  protected readonly toughnessPath = TOUGHNESS_PATH;
+  protected readonly known = computed(() => toughnessKnown(this.input()));
   protected readonly name = (path: string) => inputName(path).name;
 
   protected givenAt(path: string): Given | null {

@@ -1,4 +1,12 @@
-import { ChangeDetectionStrategy, Component, computed, inject, input, signal } from '@angular/core';
+import {
+  ChangeDetectionStrategy,
+  Component,
+  computed,
+  inject,
+  input,
+  linkedSignal,
+  signal,
+} from '@angular/core';
 import { toObservable, toSignal } from '@angular/core/rxjs-interop';
 import { Router } from '@angular/router';
 import { type MaterialBody, materialBody } from '@ligament/domain/contract/materials';
@@ -7,10 +15,17 @@ import { loadable, LOADING } from '../../core/http/loadable';
 import { type Problem, problemOf } from '../../core/http/problem';
 import { PageHeader } from '../../shared/page-header/page-header';
 import { ProblemNotice } from '../../shared/problem/problem-notice';
-import { RecordForm, type SavedRecord } from '../../shared/record-form/record-form';
+import {
+  type RecordFill,
+  RecordForm,
+  type SavedRecord,
+} from '../../shared/record-form/record-form';
+import type { RecordValue } from '../../shared/record-form/record-group';
 import { LoadingState } from '../../shared/states/loading-state';
+import { AskToughness } from '../../shared/toughness/ask-toughness';
 import { MATERIAL_FIELDS } from './material-properties';
 import { MaterialsClient } from './materials-client';
+import { toughnessKnown, withToughness } from './toughness-of-material';
 
 /** Adds a material, or changes one with a reason. */
 @Component({
@@ -40,7 +55,8 @@ import { MaterialsClient } from './materials-client';
           <app-record-form
             [fields]="fields"
             [checks]="checks"
-            [start]="shown.value ?? {}"
+            [start]="start()"
+            [fill]="bySource"
             [asksReason]="shown.value !== null"
             [action]="shown.value ? 'Save the change' : 'Add the material'"
             [problem]="problem()"
@@ -57,6 +73,7 @@ export class MaterialForm {
   /** The material to change; without it a new one is made. */
   readonly id = input<string>();
   private readonly client = inject(MaterialsClient);
+  private readonly toughness = inject(AskToughness);
   private readonly router = inject(Router);
   protected readonly fields = MATERIAL_FIELDS;
   protected readonly checks = materialBody.shape;
@@ -69,6 +86,19 @@ export class MaterialForm {
     const loaded = this.loaded();
     return loaded.state === 'ready' ? loaded.value : null;
   });
+
+  protected readonly start = linkedSignal<RecordValue>(() => ({ ...this.material() }));
+  protected readonly bySource: RecordFill = {
+    label: 'Toughness by its source…',
+    values: (held) => {
+      this.toughness
+        .ask(toughnessKnown(held))
+        .subscribe((answer) =>
+          this.start.update((at) => withToughness({ ...at, ...held }, answer)),
+        );
+      return 'Value, origin and temperature stand in the form once you use a value of the dialog.';
+    },
+  };
 
   protected save({ value, version }: SavedRecord): void {
     // every field has passed the contract's check in the form
