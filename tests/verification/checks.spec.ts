@@ -21,6 +21,7 @@ describe('the engine against published values', () => {
     expect([...new Set(CHECK_ROWS.map(({ group }) => group))]).toEqual([
       'Units',
       'Stress from pressure',
+      'Characterisation',
       'Stress raisers',
       'Crack-tip field',
       'Stress intensity',

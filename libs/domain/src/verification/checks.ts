@@ -1,7 +1,9 @@
 import { CORROSION_EXAMPLE_CHECKS } from './corrosion-example-checks';
+import { COLLAPSE_CHECKS } from './collapse-checks';
 import { CURVATURE_CHECKS } from './curvature-checks';
 import { CURVED_K_CHECKS } from './curved-k-checks';
 import { CURVED_K_ELEMENT_CHECKS } from './curved-k-element-checks';
+import { CHARACTERISATION_CHECKS } from './characterisation-checks';
 import { evaluateRow, type CheckResult, type CheckRow } from './check-row';
 import { DETECTION_CHECKS } from './detection-checks';
 import { DIAGRAM_CHECKS } from './diagram-checks';
@@ -35,6 +37,7 @@ import { WELD_TOE_CHECKS } from './weld-toe-checks';
 export const CHECK_ROWS: readonly CheckRow[] = [
   ...UNIT_CHECKS,
   ...PRESSURE_CHECKS,
+  ...CHARACTERISATION_CHECKS,
   ...STRESS_RAISER_CHECKS,
   ...TIP_FIELD_CHECKS,
   ...STRESS_INTENSITY_CHECKS,
@@ -45,6 +48,7 @@ export const CHECK_ROWS: readonly CheckRow[] = [
   ...FLAT_K_ELEMENT_CHECKS,
   ...CURVED_K_ELEMENT_CHECKS,
   ...REFERENCE_STRESS_CHECKS,
+  ...COLLAPSE_CHECKS,
   ...TOUGHNESS_CHECKS,
   ...MASTER_CURVE_CHECKS,
   ...DIAGRAM_CHECKS,

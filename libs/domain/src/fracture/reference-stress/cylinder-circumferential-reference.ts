@@ -31,7 +31,8 @@ export function cylinderCircumferentialReference(crack: Crack, membrane: MPa, be
   const { a, c, thickness, insideRadius } = crack;
   const depth = a / thickness;
   if (!(depth < 1)) return Number.POSITIVE_INFINITY as MPa;
-  const angle = c / insideRadius;
+  // beyond the whole circumference there is no more to crack
+  const angle = Math.min(c / insideRadius, Math.PI);
   const section =
     (Math.PI * (1 - depth) + 2 * depth * Math.sin(angle)) /
     ((1 - depth) * (Math.PI - angle * depth));

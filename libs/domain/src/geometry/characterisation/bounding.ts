@@ -14,7 +14,11 @@ export interface BoundingRectangle {
 
 /**
  * The rectangle that holds every sized point: length and height are its sides, for a flaw of any outline.
- * Null without a point, or where one is no number.
+ * @param points sized points along the wall and through it [mm]
+ * @returns length, height and distance to the face; null without a point, or where one is no number [mm]
+ * @validity depths counted from one face
+ * @source definition, BS 7910 and API 579-1 (from memory)
+ * @example boundingRectangle([{ alongMm: 0, depthMm: 3 }, { alongMm: 9, depthMm: 8 }]).heightMm // 5
  */
 export function boundingRectangle(points: readonly SizedPoint[]): BoundingRectangle | null {
   const along = points.map(({ alongMm }) => alongMm);
