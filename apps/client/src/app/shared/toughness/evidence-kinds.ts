@@ -28,7 +28,7 @@ export const NUMBERS = {
   referenceC: { label: 'Reference temperature of the curve', unit: '°C' },
   probability: { label: 'Share of fronts below the value', unit: '', chosen: true },
   allowanceC: {
-    label: 'Allowance on T0, empty for the usual',
+    label: 'Allowance on T0, if not usual',
     unit: '°C',
     chosen: true,
     optional: true,
