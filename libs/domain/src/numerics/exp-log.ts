@@ -28,30 +28,24 @@ const FRACTIONS = fractions();
 const RECIPROCALS = Float64Array.from({ length: PARTS }, (_, j) => 1 / middle(j));
 const LOGARITHMS = Float64Array.from({ length: PARTS }, (_, j) => seriesLog(middle(j)));
 
-const one = new Float64Array(1);
-
 /** The exponential function; beyond ±700 it stays at its value there. */
 export function exp(x: number): number {
-  one[0] = x;
-  expEach(one, 1);
-  return one[0] as number;
+  const bounded = x > 700 ? 700 : x < -700 ? -700 : x;
+  const whole = bounded * PARTS_PER_E + ROUNDER - ROUNDER;
+  const r = bounded - whole * PART_HIGH - whole * PART_LOW;
+  const k = whole | 0;
+  const r2 = r * r;
+  const series = 1 + (r + r2 * (0.5 + r * (1 / 6) + r2 * (1 / 24)));
+  return (
+    (FRACTIONS[k & (EXP_PARTS - 1)] as number) *
+    series *
+    (OCTAVES[(k >> EXP_BITS) + 1022] as number)
+  );
 }
 
 /** The exponential of the first numbers of a list, in place. */
 export function expEach(values: Float64Array, count: number): void {
-  for (let i = 0; i < count; i++) {
-    const x = values[i] as number;
-    const bounded = x > 700 ? 700 : x < -700 ? -700 : x;
-    const whole = bounded * PARTS_PER_E + ROUNDER - ROUNDER;
-    const r = bounded - whole * PART_HIGH - whole * PART_LOW;
-    const k = whole | 0;
-    const r2 = r * r;
-    const series = 1 + (r + r2 * (0.5 + r * (1 / 6) + r2 * (1 / 24)));
-    values[i] =
-      (FRACTIONS[k & (EXP_PARTS - 1)] as number) *
-      series *
-      (OCTAVES[(k >> EXP_BITS) + 1022] as number);
-  }
+  for (let i = 0; i < count; i++) values[i] = exp(values[i] as number);
 }
 
 /** Least and greatest argument of `log`. */
@@ -60,23 +54,19 @@ export const LOG_GREATEST = 2 ** 24;
 
 /** The natural logarithm of a number between 1/64 and 2^24; outside the answer means nothing. */
 export function log(x: number): number {
-  one[0] = x;
-  logEach(one, 1);
-  return one[0] as number;
+  const scaled = x * 64;
+  const octave = 31 - Math.clz32(scaled | 0);
+  const mantissa = scaled * (OCTAVES[1022 - octave] as number);
+  const j = ((mantissa * PARTS) | 0) - PARTS;
+  const r = mantissa * (RECIPROCALS[j] as number) - 1;
+  const r2 = r * r;
+  const series = r - r2 * (0.5 - r * (1 / 3) + r2 * (0.25 - r * 0.2 + r2 * (1 / 6)));
+  return (octave - 6) * LN2 + ((LOGARITHMS[j] as number) + series);
 }
 
 /** The natural logarithm of the first numbers of a list, each between 1/64 and 2^24, in place. */
 export function logEach(values: Float64Array, count: number): void {
-  for (let i = 0; i < count; i++) {
-    const scaled = (values[i] as number) * 64;
-    const octave = 31 - Math.clz32(scaled | 0);
-    const mantissa = scaled * (OCTAVES[1022 - octave] as number);
-    const j = ((mantissa * PARTS) | 0) - PARTS;
-    const r = mantissa * (RECIPROCALS[j] as number) - 1;
-    const r2 = r * r;
-    const series = r - r2 * (0.5 - r * (1 / 3) + r2 * (0.25 - r * 0.2 + r2 * (1 / 6)));
-    values[i] = (octave - 6) * LN2 + ((LOGARITHMS[j] as number) + series);
-  }
+  for (let i = 0; i < count; i++) values[i] = log(values[i] as number);
 }
 
 /** The natural logarithm of any positive normal number, at the cost of a loop. */

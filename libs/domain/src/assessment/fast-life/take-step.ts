@@ -23,44 +23,30 @@ export function goTo(l: number, s: number, q: number): void {
   lnAspect[l] = q;
 }
 
-// one small loop for each stage: together they would be too long for the compiler to inline what they call
-const STAGE_PLACES = [
-  (used: number) => {
-    for (let l = 0; l < used; l++) to(l, 1 / 5, k(0, l) / 5);
-  },
-  (used: number) => {
-    for (let l = 0; l < used; l++) to(l, 3 / 10, A31 * k(0, l) + A32 * k(1, l));
-  },
-  (used: number) => {
-    for (let l = 0; l < used; l++) to(l, 4 / 5, A41 * k(0, l) + A42 * k(1, l) + A43 * k(2, l));
-  },
-  (used: number) => {
-    for (let l = 0; l < used; l++) {
-      to(l, 8 / 9, A51 * k(0, l) + A52 * k(1, l) + A53 * k(2, l) + A54 * k(3, l));
-    }
-  },
-  (used: number) => {
-    for (let l = 0; l < used; l++) {
-      to(l, 1, A61 * k(0, l) + A62 * k(1, l) + A63 * k(2, l) + A64 * k(3, l) + A65 * k(4, l));
-    }
-  },
-  (used: number) => {
-    for (let l = 0; l < used; l++) {
-      to(l, 1, B1 * k(0, l) + B3 * k(2, l) + B4 * k(3, l) + B5 * k(4, l) + B6 * k(5, l));
-      endQ[l] = lnAspect[l] as number;
-    }
-  },
-] as const;
-
 /**
  * One step of the first `used` lanes, each of its own length, stage by stage; the slopes at its start are known.
  * Only q enters the slopes; the cycles are a sum afterwards.
  */
 export function takeStep(used: number): void {
-  for (let stage = 0; stage < STAGE_PLACES.length; stage++) {
-    STAGE_PLACES[stage]?.(used);
-    evaluate(0, used, stage + 1);
+  for (let l = 0; l < used; l++) to(l, 1 / 5, k(0, l) / 5);
+  evaluate(0, used, 1);
+  for (let l = 0; l < used; l++) to(l, 3 / 10, A31 * k(0, l) + A32 * k(1, l));
+  evaluate(0, used, 2);
+  for (let l = 0; l < used; l++) to(l, 4 / 5, A41 * k(0, l) + A42 * k(1, l) + A43 * k(2, l));
+  evaluate(0, used, 3);
+  for (let l = 0; l < used; l++) {
+    to(l, 8 / 9, A51 * k(0, l) + A52 * k(1, l) + A53 * k(2, l) + A54 * k(3, l));
   }
+  evaluate(0, used, 4);
+  for (let l = 0; l < used; l++) {
+    to(l, 1, A61 * k(0, l) + A62 * k(1, l) + A63 * k(2, l) + A64 * k(3, l) + A65 * k(4, l));
+  }
+  evaluate(0, used, 5);
+  for (let l = 0; l < used; l++) {
+    to(l, 1, B1 * k(0, l) + B3 * k(2, l) + B4 * k(3, l) + B5 * k(4, l) + B6 * k(5, l));
+  }
+  for (let l = 0; l < used; l++) endQ[l] = lnAspect[l] as number;
+  evaluate(0, used, 6);
 }
 
 /** Slope of q at a stage. */
