@@ -8,7 +8,7 @@ export interface NeighbourInput {
   readonly lengthMm: Given;
   /** Ligament to the face the assessed flaw is measured from [mm]; null for a surface flaw. */
   readonly ligamentMm: Given | null;
-  /** From centre to centre along the flaws [mm]. */
+  /** From centre to centre along the flaws, to either side [mm]. */
   readonly distanceMm: Given;
   /** Distance between the two planes [mm]. */
   readonly planeOffsetMm: Given;

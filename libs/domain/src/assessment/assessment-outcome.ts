@@ -64,7 +64,8 @@ export type GrowthEnd =
 export interface GrowthEvent {
   readonly years: number;
   readonly from: 'surface' | 'embedded';
-  readonly to: 'surface' | 'through-wall';
+  /** The same as before when the flaw joins its neighbour. */
+  readonly to: 'surface' | 'embedded' | 'through-wall';
   readonly heightBeforeMm: number;
   readonly heightAfterMm: number;
   readonly lengthAfterMm?: number;

@@ -141,8 +141,27 @@ const somePrimaryStress: Rule = ({ stress, wall }) => {
   };
 };
 
+const neighboursCanBe: Rule = ({ neighbours, flaw, wall }) => {
+  if (!neighbours?.length) return null;
+  if (flaw.kind === 'surface' || flaw.kind === 'embedded') {
+    const missing = neighbours.findIndex(
+      ({ kind, ligamentMm }) => kind === 'embedded' && ligamentMm === null,
+    );
+    if (missing < 0 && wall.shape !== 'round bar') return null;
+  }
+  return {
+    input: 'neighbours',
+    limit: 'surface and embedded flaws of one wall, embedded ones with their ligament',
+    value: flaw.kind,
+    message:
+      'The rules of interaction hold for surface and embedded flaws whose ligaments are known.',
+    instead: 'Give the ligament of every embedded neighbour, or assess the enclosing flaw.',
+  };
+};
+
 const RULES: readonly Rule[] = [
   kindFitsWall,
+  neighboursCanBe,
   chosenSolutionExists,
   peakAtNozzle,
   heightLeavesWall,

@@ -1,5 +1,10 @@
 import { growWithTime } from '../growth/grow-with-time';
-import { integrateGrowth, type GrowthLimit, type GrowthRun } from '../growth/integrate-growth';
+import {
+  integrateGrowth,
+  type GrowthLimit,
+  type GrowthRun,
+  type SizeAt,
+} from '../growth/integrate-growth';
 import {
   PROXIMITY_RULE,
   proximityMargin,
@@ -13,6 +18,8 @@ import type { GrowthDrivers } from './drivers';
 import { growthRates, lawMargin } from './growth-rates-of';
 import type { GrowthEnd, GrowthEvent, GrowthState } from './assessment-outcome';
 import type { CharacterisedFlaw } from './characterise';
+import type { Neighbourhood } from './combine-neighbours';
+import { firstMeeting, joinNeighbour, type Meeting } from './join-neighbours';
 import type { FlawCase } from './flaw-case';
 import { growthStates, type Stretch } from './growth-states';
 import { sectionOf, type Section } from './section';
@@ -26,6 +33,10 @@ export interface GrowthHistory {
   /** Limit of a solution that ended it, in words. */
   readonly validityLimit: string | null;
 }
+
+/** Limits that end a stretch of the way and not the way itself. */
+const PROXIMITY = 'proximity';
+const NEIGHBOUR = 'neighbour';
 
 /** States wanted on the path for drawing. */
 const DRAWN_STATES = 40;
@@ -43,46 +54,112 @@ export function followGrowth(
   let elapsed = 0;
   for (;;) {
     const section = sectionOf(flaw, current, drivers.thinning);
-    const run = runSection(section, current, drivers, { elapsed, horizonYears });
+    const { neighbourhood } = current;
+    const around = neighbourhood && { flaw, neighbourhood, drivers, elapsed };
+    const meeting = around ? firstMeeting(around, current, section, horizonYears - elapsed) : null;
+    const run = runSection(section, current, drivers, { elapsed, horizonYears, meeting });
     stretches.push({ section, run, from: elapsed });
     const last = run.states[run.states.length - 1] ?? { years: 0, a: current.a, c: current.c };
     elapsed += last.years;
-    if (run.limit !== 'proximity') {
+    if (run.limit === PROXIMITY) {
+      events.push(surfacing(section, last, elapsed));
+      current = surfaced(current, section, last, elapsed);
+    } else if (run.limit === NEIGHBOUR && around && meeting) {
+      const ligamentMm = section.crackAt(last.a, last.c, elapsed).ligament;
+      const joint = joinNeighbour(around, { a: last.a, c: last.c, ligamentMm }, meeting);
+      events.push(joining(current, joint, last, elapsed));
+      current = asJoined(current, joint);
+    } else {
       const end = endOf(run, section, last, elapsed);
       if (end.end === 'through-wall') events.push(breakthrough(section, last, elapsed));
       return { path: growthStates(stretches, drivers), events, years: elapsed, ...end };
     }
-    const nearest = section.ligament(last.a, elapsed);
-    const depth = surfaceDepth(last.a, nearest);
-    events.push({
-      years: elapsed,
-      from: 'embedded',
-      to: 'surface',
-      heightBeforeMm: 2 * last.a,
-      heightAfterMm: depth,
-      rule: PROXIMITY_RULE,
-    });
-    current = {
-      ...current,
-      kind: 'surface',
-      face: section.nearestFace(last.a),
-      a: depth,
-      c: last.c,
-      ligament: 0,
-      height: depth,
-      recategorised: true,
-    };
   }
+}
+
+type Size = Pick<SizeAt, 'a' | 'c'>;
+
+/** The embedded flaw that has come so near the face that it counts as breaking it. */
+function surfacing(section: Section, { a }: Size, years: number): GrowthEvent {
+  return {
+    years,
+    from: 'embedded',
+    to: 'surface',
+    heightBeforeMm: 2 * a,
+    heightAfterMm: surfaceDepth(a, section.ligament(a, years)),
+    rule: PROXIMITY_RULE,
+  };
+}
+
+function surfaced(
+  current: CharacterisedFlaw,
+  section: Section,
+  { a, c }: Size,
+  years: number,
+): CharacterisedFlaw {
+  const depth = surfaceDepth(a, section.ligament(a, years));
+  const { neighbourhood } = current;
+  return {
+    ...current,
+    kind: 'surface',
+    face: section.nearestFace(a),
+    a: depth,
+    c,
+    ligament: 0,
+    height: depth,
+    recategorised: true,
+    neighbourhood: neighbourhood && {
+      ...neighbourhood,
+      flaw: { ...neighbourhood.flaw, kind: 'surface', a: depth, c, ligamentMm: 0 },
+    },
+  };
+}
+
+const heightOf = (kind: FlawKind, a: number): number => (kind === 'embedded' ? 2 * a : a);
+
+function joining(
+  { kind }: CharacterisedFlaw,
+  { flaw, rule }: Neighbourhood,
+  before: Size,
+  years: number,
+): GrowthEvent {
+  const same = kind === 'embedded' ? 'embedded' : 'surface';
+  return {
+    years,
+    from: same,
+    to: same,
+    heightBeforeMm: heightOf(kind, before.a),
+    heightAfterMm: heightOf(kind, flaw.a),
+    lengthAfterMm: 2 * flaw.c,
+    rule: `${rule.title}: it joins its neighbour`,
+  };
+}
+
+const asJoined = (current: CharacterisedFlaw, neighbourhood: Neighbourhood): CharacterisedFlaw => ({
+  ...current,
+  a: neighbourhood.flaw.a,
+  c: neighbourhood.flaw.c,
+  ligament: neighbourhood.flaw.ligamentMm,
+  height: heightOf(current.kind, neighbourhood.flaw.a),
+  neighbourhood,
+});
+
+/** From when to when a section is followed, and when it meets a neighbour. */
+interface Span {
+  readonly elapsed: number;
+  readonly horizonYears: number;
+  readonly meeting: Meeting | null;
 }
 
 function runSection(
   section: Section,
   start: CharacterisedFlaw,
   drivers: GrowthDrivers,
-  { elapsed, horizonYears: end }: { readonly elapsed: number; readonly horizonYears: number },
+  { elapsed, horizonYears: end, meeting }: Span,
 ): GrowthRun {
   const rates = growthRates(section, drivers, elapsed);
   const limits = limitsOf(section, drivers, elapsed);
+  if (meeting) limits.unshift({ key: NEIGHBOUR, margin: (_a, _c, years) => meeting.years - years });
   const horizonYears = end - elapsed;
   const size = { a: start.a, c: start.c };
   // a jump in category may land on a limit at once
@@ -103,7 +180,7 @@ function limitsOf(section: Section, drivers: GrowthDrivers, elapsed: number): Gr
   ];
   if (section.kind === 'embedded') {
     limits.unshift({
-      key: 'proximity',
+      key: PROXIMITY,
       margin: (a, _c, years) => proximityMargin(a, section.ligament(a, elapsed + years)),
     });
   }

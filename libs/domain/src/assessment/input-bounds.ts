@@ -111,7 +111,7 @@ const OPTIONAL: readonly Row[] = [
   ['neighbours.*.heightMm', 'Height of the neighbour', 'mm', 0, 1000, LENGTH, 'above'],
   ['neighbours.*.lengthMm', 'Length of the neighbour', 'mm', 0, 1e5, LENGTH, 'above'],
   ['neighbours.*.ligamentMm', 'Ligament of the neighbour', 'mm', 0, 1000, LENGTH],
-  ['neighbours.*.distanceMm', 'Distance of the neighbour', 'mm', 0, 1e5, LENGTH],
+  ['neighbours.*.distanceMm', 'Distance of the neighbour', 'mm', -1e5, 1e5, LENGTH],
   ['neighbours.*.planeOffsetMm', 'Distance of the planes', 'mm', 0, 1e5, LENGTH],
   ['partialFactors.stress', 'Factor on stress', '', 1, 5, FACTOR],
   ['partialFactors.size', 'Factor on size', '', 1, 5, FACTOR],

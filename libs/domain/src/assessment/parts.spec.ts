@@ -23,6 +23,7 @@ describe('characterise', () => {
       sizedHeight: 5,
       sizedLength: 26,
       recategorised: false,
+      neighbourhood: null,
     });
   });
 

@@ -44,10 +44,13 @@ export interface Section {
   ) => { readonly heightMm: number; readonly lengthMm: number };
 }
 
+/** Where a flaw starts in its wall. */
+export type PlacedStart = Pick<CharacterisedFlaw, 'kind' | 'face' | 'a' | 'c' | 'ligament'>;
+
 /** Sets a characterised flaw into its case: kind and face decide the solutions, the face the sign of bending. */
 export function sectionOf(
   flaw: FlawCase,
-  { kind, face, a: startA, ligament: startLigament }: CharacterisedFlaw,
+  { kind, face, a: startA, ligament: startLigament }: PlacedStart,
   thinning: Thinning | null = null,
 ): Section {
   const turned = face === flaw.situation.face ? flaw : turnedOver(flaw);

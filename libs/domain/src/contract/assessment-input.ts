@@ -96,7 +96,7 @@ const neighbour = z.strictObject({
   heightMm: length(5000),
   lengthMm: length(1e6),
   ligamentMm: given(between(0, 5000, 'mm')).nullable(),
-  distanceMm: given(between(0, 1e6, 'mm')),
+  distanceMm: given(between(-1e6, 1e6, 'mm')),
   planeOffsetMm: given(between(0, 1e6, 'mm')),
 });
 

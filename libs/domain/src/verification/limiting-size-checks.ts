@@ -56,6 +56,7 @@ function limitingDepth(length: number, toughness: number, residual: number): num
     sizedHeight: 5,
     sizedLength: length,
     recategorised: false,
+    neighbourhood: null,
   } as const;
   return limitingSize(sectionOf(plate(toughness, residual), flaw), flaw).heightMm ?? Number.NaN;
 }

@@ -12,6 +12,7 @@ const step = stepIn('Flaw size');
 /** From the measured size to the assessed flaw. */
 export const sizeSteps = (subject: SheetSubject): CalculationStep[] => [
   ...measuredSteps(subject),
+  ...neighbourSteps(subject),
   ...categorySteps(subject),
 ];
 
@@ -48,6 +49,32 @@ function measuredSteps({ input, flaw }: SheetSubject): CalculationStep[] {
     },
   );
   return hasHeight(measured.kind) ? [height, length] : [length];
+}
+
+/** What the rules of interaction made of the flaw and its neighbours. */
+function neighbourSteps({ flaw: { neighbourhood } }: SheetSubject): CalculationStep[] {
+  if (!neighbourhood) return [];
+  const { rule, steps } = neighbourhood;
+  if (steps.length === 0) {
+    return [
+      step('s', 'Neighbours do not interact', 'apart', '', {
+        formula: 'gap above the limit of the rule, or another plane',
+        source: rule.source,
+        inputs: neighbourhood.others.map(({ name }) => name),
+      }),
+    ];
+  }
+  return steps.map(({ flaws, into, gapMm, limitMm, arrangement }) =>
+    step('2c', `Combined, ${arrangement}: ${flaws.join(' and ')}`, 2 * into.c, 'mm', {
+      formula: 'from end to end and from face to lowest point, as the gap is within the limit',
+      source: rule.source,
+      inputs: [
+        `gap = ${number(gapMm)} mm`,
+        `limit = ${number(limitMm)} mm`,
+        `${into.kind === 'surface' ? 'a' : '2a'} = ${number(into.kind === 'surface' ? into.a : 2 * into.a)} mm`,
+      ],
+    }),
+  );
 }
 
 function categorySteps(subject: SheetSubject): CalculationStep[] {

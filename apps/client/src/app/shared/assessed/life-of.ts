@@ -44,8 +44,10 @@ export function lifeOf(each: AssessedCase, around: LifeSurroundings): LifeDrawin
   };
 }
 
-const eventWords = ({ to }: GrowthEvent) =>
-  to === 'through-wall' ? 'through the wall' : 'breaks the surface';
+const eventWords = ({ from, to }: GrowthEvent) => {
+  if (to === 'through-wall') return 'through the wall';
+  return from === to ? 'joins its neighbour' : 'breaks the surface';
+};
 
 const QUANTITY = { depth: 'Depth', height: 'Height', length: 'Length' } as const;
 
